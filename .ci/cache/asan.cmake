@@ -1,0 +1,5 @@
+# First cache values of the sanitizer build: cmake -C .ci/cache/asan.cmake ...
+# -O1 and -g1 keep compiling short; without NDEBUG the assertions of Eigen are on.
+set(CMAKE_BUILD_TYPE RelWithDebInfo CACHE STRING "")
+set(CMAKE_CXX_FLAGS "-fsanitize=address,undefined -fno-sanitize-recover=all -fno-omit-frame-pointer" CACHE STRING "")
+set(CMAKE_CXX_FLAGS_RELWITHDEBINFO "-O1 -g1" CACHE STRING "")

@@ -1,0 +1,29 @@
+# What every target of the house shares: the language level, and warnings as errors in our own build only.
+
+function(swaymark_target_settings target)
+  target_compile_features(${target} PUBLIC cxx_std_20)
+  set_target_properties(${target} PROPERTIES CXX_EXTENSIONS OFF)
+  if(PROJECT_IS_TOP_LEVEL)
+    target_compile_options(${target} PRIVATE -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wold-style-cast
+                                             -Wnon-virtual-dtor -Woverloaded-virtual -Werror)
+    # GCC 12 sees an overlap in "text" + std::string that is not there (its bug 105651).
+    target_compile_options(${target} PRIVATE $<$<CXX_COMPILER_ID:GNU>:-Wno-restrict>)
+  endif()
+endfunction()
+
+# swaymark_library(<folder> SOURCES ... HEADERS ... LINKS ... PRIVATE_LINKS ...)
+# makes the target swaymark_<folder> with the name swaymark::<folder>, the same before and after installing.
+function(swaymark_library folder)
+  cmake_parse_arguments(ARG "" "" "SOURCES;HEADERS;LINKS;PRIVATE_LINKS" ${ARGN})
+  set(target swaymark_${folder})
+  add_library(${target} STATIC ${ARG_SOURCES})
+  add_library(swaymark::${folder} ALIAS ${target})
+  set_target_properties(${target} PROPERTIES EXPORT_NAME ${folder})
+  target_sources(${target} PUBLIC FILE_SET HEADERS BASE_DIRS ${PROJECT_SOURCE_DIR} FILES ${ARG_HEADERS})
+  target_link_libraries(${target} PUBLIC ${ARG_LINKS})
+  # $<BUILD_INTERFACE> keeps private header-only helpers out of the installed package.
+  foreach(library IN LISTS ARG_PRIVATE_LINKS)
+    target_link_libraries(${target} PRIVATE $<BUILD_INTERFACE:${library}>)
+  endforeach()
+  swaymark_target_settings(${target})
+endfunction()

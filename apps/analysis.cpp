@@ -1,0 +1,182 @@
+#include "apps/analysis.hpp"
+
+#include <algorithm>
+#include <cmath>
+#include <numbers>
+
+#include <fmt/format.h>
+
+#include "modal/damping.hpp"
+#include "modal/mode_character.hpp"
+#include "modal/participation.hpp"
+
+namespace swaymark {
+
+namespace {
+
+constexpr double kTurn = 2.0 * std::numbers::pi;
+
+ModeTarget target_of(const Analysis& analysis) {
+  const Tower& tower = analysis.tower;
+  ModeTarget target;
+  if (tower.modes.count) target.count = *tower.modes.count;
+  if (tower.modes.up_to) target.omega_up_to = kTurn * *tower.modes.up_to;
+  target.mass_share = tower.modes.mass_share;
+  target.share_directions = analysis.excited();
+  if (analysis.scope == Scope::check && !tower.bands.empty()) {
+    double reach = 0.0;
+    for (const BandStatement& band : tower.bands) reach = std::max(reach, band_reach(band));
+    target.omega_covered = kTurn * reach;
+  }
+  return target;
+}
+
+void require_usable(const ModeSet& set) {
+  switch (set.modes.status) {
+    case ModesStatus::complete:
+    case ModesStatus::uncounted:
+      break;
+    case ModesStatus::incomplete:
+      throw ComputationError({"modes are missing: the count from the factorisation and the solver disagree",
+                              "look for stiffnesses or masses that differ by many powers of ten"});
+    case ModesStatus::not_converged:
+      throw ComputationError(
+          {"the eigensolver did not converge", "ask for fewer modes, or look for very unequal stiffnesses"});
+    case ModesStatus::not_positive_definite:
+      throw ComputationError({"the stiffness matrix is singular to working precision",
+                              "look for stiffnesses that differ by more than ten powers of ten"});
+  }
+  if (set.reached) return;
+  throw ComputationError(
+      {fmt::format("more modes are asked for than can be extracted ({} of {})", set.modes.count(),
+                   set.available),
+       "ask for fewer modes, a lower frequency or a smaller mass share, or shorten the bands"});
+}
+
+Eigen::MatrixXd motion_of(const DofMap& dofs, std::size_t nodes, const Eigen::VectorXd& shape) {
+  Eigen::MatrixXd motion = Eigen::MatrixXd::Zero(static_cast<Index>(nodes), 3);
+  for (Index i = 0; i < dofs.free_count(); ++i) {
+    const Index dof = dofs.free_dofs()[static_cast<std::size_t>(i)];
+    motion(static_cast<Index>(dofs.node_of(dof)), index_of(dofs.axis_of(dof))) = shape(i);
+  }
+  return motion;
+}
+
+// "local at 7, 9" where few nodes of a larger tower hold nearly all of the motion; else the motion of the
+// levels.
+std::string character(const Tower& tower, const NodeCloud& cloud, const Eigen::MatrixXd& motion) {
+  const auto nodes = energy_nodes(cloud, motion);
+  const auto moving = (cloud.masses.array() > 0.0).count();
+  if (moving >= 10 && nodes.size() <= 2) {
+    std::string names;
+    for (const Index node : nodes)
+      names += (names.empty() ? "" : ", ") + tower.nodes[static_cast<std::size_t>(node)].name;
+    return "local at " + names;
+  }
+  if (tower.dimensions == 1) return "along x";
+  return character_of(character_shares(cloud, motion));
+}
+
+void describe_modes(Analysis& analysis) {
+  const Tower& tower = analysis.tower;
+  const DofMap& dofs = analysis.assembly.dofs;
+  const Index modes = analysis.set.modes.count();
+  analysis.frequency = analysis.set.modes.omega / kTurn;
+  if (!tower.damping.empty()) analysis.damping = modal_damping(tower.damping, modes);
+  analysis.mass_ratio = Eigen::MatrixXd::Zero(modes, 3);
+  for (std::size_t k = 0; k < dofs.axes().size(); ++k) {
+    const auto column = static_cast<Index>(k);
+    const double moving = analysis.set.moving(column);
+    if (moving <= 0.0) continue;
+    analysis.mass_ratio.col(index_of(dofs.axes()[k])) =
+        analysis.set.participation.col(column).array().square() / moving;
+  }
+  NodeCloud cloud;
+  cloud.positions.resize(static_cast<Index>(tower.nodes.size()), 3);
+  cloud.masses.resize(static_cast<Index>(tower.nodes.size()));
+  const Eigen::VectorXd weights = analysis.assembly.mass_all * rigid_translation(dofs, Axis::x);
+  for (std::size_t node = 0; node < tower.nodes.size(); ++node) {
+    cloud.positions.row(static_cast<Index>(node)) = tower.nodes[node].position.transpose();
+    cloud.masses(static_cast<Index>(node)) = weights(dofs.dof(node, 0));
+  }
+  for (Index j = 0; j < modes; ++j) {
+    const Eigen::MatrixXd motion = motion_of(dofs, tower.nodes.size(), analysis.set.modes.shapes.col(j));
+    analysis.character.push_back(character(tower, cloud, motion));
+  }
+}
+
+}  // namespace
+
+std::vector<Index> Analysis::excited() const {
+  std::vector<Index> places;
+  const auto axes = tower.axes();
+  const auto band_asks = [&](Axis axis) {
+    return std::any_of(tower.bands.begin(), tower.bands.end(), [&](const BandStatement& band) {
+      const bool horizontal = band.direction == BandDirection::horizontal && axis != Axis::z;
+      return horizontal || name_of(band.direction) == name_of(axis);
+    });
+  };
+  for (std::size_t k = 0; k < axes.size(); ++k) {
+    const bool shaken = tower.seismic && tower.seismic->spectrum[static_cast<std::size_t>(axes[k])];
+    if (shaken || band_asks(axes[k])) places.push_back(static_cast<Index>(k));
+  }
+  if (!places.empty()) return places;
+  for (std::size_t k = 0; k < axes.size(); ++k) {
+    if (axes[k] != Axis::z) places.push_back(static_cast<Index>(k));
+  }
+  return places;
+}
+
+Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
+  Assembly assembly = assemble(tower);
+  MassLedger ledger = mass_ledger(tower, assembly);
+  MechanismReport mechanisms = find_mechanisms(tower, assembly);
+  Analysis analysis{scope,
+                    std::move(tower),
+                    std::move(provenance),
+                    std::move(assembly),
+                    std::move(ledger),
+                    std::move(mechanisms),
+                    {},
+                    {},
+                    {},
+                    {},
+                    {},
+                    {},
+                    {},
+                    {},
+                    {}};
+  if (analysis.mechanisms.any()) return analysis;
+  const SparseMatrix& stiffness = analysis.assembly.stiffness;
+  const SparseMatrix& mass = analysis.assembly.mass;
+  if (mass.rows() == 0)
+    throw ComputationError({"nothing is free to move", "leave at least one axis of one node free"});
+  const auto& axes = analysis.assembly.dofs.axes();
+  Eigen::MatrixXd drive(mass.rows(), static_cast<Index>(axes.size()));
+  for (std::size_t k = 0; k < axes.size(); ++k) {
+    drive.col(static_cast<Index>(k)) =
+        inertia_vector(analysis.assembly, rigid_translation(analysis.assembly.dofs, axes[k]));
+  }
+  const Eigenproblem problem(stiffness, mass);
+  if (problem.mode_count() == 0) {
+    throw ComputationError({"nothing that is free to move has mass",
+                            "give the material a density, or carry a mass at a free node"});
+  }
+  analysis.set = find_modes(problem, stiffness, mass, drive, target_of(analysis));
+  require_usable(analysis.set);
+  describe_modes(analysis);
+  if (scope == Scope::check) {
+    for (const BandStatement& band : analysis.tower.bands) {
+      analysis.bands.push_back(examine_band(band, analysis.frequency, analysis.mass_ratio));
+    }
+    if (analysis.tower.seismic) {
+      analysis.seismic =
+          seismic_analysis(analysis.tower, analysis.assembly, problem, analysis.set, analysis.damping);
+    }
+  }
+  analysis.verdicts = verdicts_of(analysis);
+  analysis.notes = notes_of(analysis);
+  return analysis;
+}
+
+}  // namespace swaymark

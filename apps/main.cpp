@@ -1,0 +1,3 @@
+#include "apps/run.hpp"
+
+int main(int argc, char** argv) { return swaymark::run(argc, argv); }

@@ -1,0 +1,142 @@
+#include <algorithm>
+#include <cmath>
+
+#include <fmt/format.h>
+
+#include "apps/analysis.hpp"
+#include "apps/report_parts.hpp"
+
+namespace swaymark {
+
+namespace {
+
+using Notes = std::vector<std::string>;
+
+void about_unused(const Analysis& analysis, Notes& notes) {
+  const Tower& tower = analysis.tower;
+  const bool any = std::any_of(tower.materials.begin(), tower.materials.end(),
+                               [](const auto& m) { return m.yield.has_value(); }) ||
+                   std::any_of(tower.sections.begin(), tower.sections.end(),
+                               [](const auto& s) { return s.curve.has_value(); });
+  if (any)
+    notes.emplace_back(
+        "Yield stresses, radii of gyration and buckling curves were read, but this version checks no "
+        "resistances.");
+}
+
+void about_modes(const Analysis& analysis, Notes& notes) {
+  const ModeSet& set = analysis.set;
+  const Tower& tower = analysis.tower;
+  const auto count = analysis.mode_count();
+  const bool only_count = tower.modes.count && !tower.modes.up_to && !tower.modes.mass_share;
+  if (tower.modes.count && *tower.modes.count > set.available) {
+    notes.push_back(fmt::format(
+        "{} modes are asked for; the tower has {}, one for each free degree of freedom with mass.",
+        *tower.modes.count, set.available));
+  } else if (only_count && count > *tower.modes.count) {
+    notes.push_back(fmt::format("{} modes are kept instead of {}: the highest band reaches up to mode {}.",
+                                count, *tower.modes.count, count));
+  }
+  if (set.cut_repeated) {
+    notes.push_back(fmt::format(
+        "Mode {} is one of a repeated pair whose other half was not asked for; ask for one mode more.",
+        count));
+  }
+  const auto massless = analysis.assembly.mass.rows() - set.available;
+  if (massless > 0) {
+    notes.push_back(fmt::format(
+        "{} free degrees of freedom have no mass: they add no mode and follow statically.", massless));
+  }
+  if (tower.damping.size() > 1 && count > static_cast<Index>(tower.damping.size())) {
+    notes.push_back(
+        fmt::format("Damping is listed for {} modes; the modes above take the last value, {:.3g} %.",
+                    tower.damping.size(), 100.0 * tower.damping.back()));
+  }
+}
+
+void about_bands(const Analysis& analysis, Notes& notes) {
+  for (std::size_t b = 0; b < analysis.bands.size(); ++b) {
+    const auto& slight = analysis.bands[b].slight;
+    if (slight.empty()) continue;
+    notes.push_back(fmt::format(
+        "Band {}: mode{} {} within it or its margin, with less than {:.0f} % of the moving mass along "
+        "'{}', do{} not count. A force applied at one node may still excite {}.",
+        band_name(analysis.tower.bands[b]), slight.size() > 1 ? "s" : "", mode_list(slight),
+        100.0 * kCountsForBand, name_of(analysis.tower.bands[b].direction), slight.size() > 1 ? "" : "es",
+        slight.size() > 1 ? "them" : "it"));
+  }
+}
+
+void about_spectra(const Analysis& analysis, Notes& notes) {
+  for (const DirectionResult& direction : analysis.seismic->directions) {
+    if (!direction.below_table.empty()) {
+      notes.push_back(
+          fmt::format("Spectrum {} along {}: the period of mode{} {} is shorter than its first point, whose "
+                      "acceleration is held.",
+                      direction.spectrum, name_of(direction.axis),
+                      direction.below_table.size() > 1 ? "s" : "", mode_list(direction.below_table)));
+    }
+    if (!direction.above_table.empty()) {
+      notes.push_back(
+          fmt::format("Spectrum {} along {}: the period of mode{} {} is longer than its last point, whose "
+                      "acceleration is held.",
+                      direction.spectrum, name_of(direction.axis),
+                      direction.above_table.size() > 1 ? "s" : "", mode_list(direction.above_table)));
+    }
+  }
+  for (std::size_t s = 0; s < analysis.tower.spectra.size(); ++s) {
+    const auto& used = analysis.seismic->statement.spectrum;
+    if (std::find(used.begin(), used.end(), s) == used.end()) continue;
+    const SpectrumStatement& statement = analysis.tower.spectra[s];
+    const DesignSpectrum spectrum(statement, 1.0);
+    const bool differs = std::any_of(analysis.damping.begin(), analysis.damping.end(),
+                                     [&](double ratio) { return spectrum.differs_in_damping(ratio); });
+    if (!differs) continue;
+    const double first = analysis.damping(0);
+    const double eta = damping_correction(first) / damping_correction(*statement.damping);
+    notes.push_back(
+        statement.damping_correction
+            ? fmt::format("Spectrum {} is drawn for {:.3g} % damping and was corrected by eta = {:.3f} for "
+                          "the {:.3g} % of mode 1.",
+                          statement.name, 100.0 * *statement.damping, eta, 100.0 * first)
+            : fmt::format(
+                  "Spectrum {} is drawn for {:.3g} % damping, the tower has {:.3g} %; the ordinates were "
+                  "used as they stand (eta would be {:.3f}: 'damping_correction: true').",
+                  statement.name, 100.0 * *statement.damping, 100.0 * first, eta));
+  }
+}
+
+void about_combination(const Analysis& analysis, Notes& notes) {
+  for (const RuleRatio& ratio : analysis.seismic->srss_against_cqc) {
+    notes.push_back(fmt::format(
+        "WARNING: SRSS with modes closer than 10 % along {}: SRSS / CQC = {:.3f} for the base shear, "
+        "{:.3f} to {:.3f} for the bar forces. SRSS is not valid here; use CQC.",
+        name_of(ratio.axis), ratio.base_shear, ratio.least_bar, ratio.most_bar));
+  }
+  std::string lifted;
+  for (const NodeReaction& reaction : node_reactions(analysis)) {
+    if (reaction.uplift.value_or(0.0) <= 0.0) continue;
+    lifted += (lifted.empty() ? "" : ", ") + analysis.tower.nodes[reaction.node].name;
+  }
+  if (!lifted.empty()) {
+    notes.push_back(fmt::format(
+        "Gravity - seismic lifts the supports at node {}: the anchorage must hold the uplift listed.",
+        lifted));
+  }
+}
+
+}  // namespace
+
+std::vector<std::string> notes_of(const Analysis& analysis) {
+  Notes notes;
+  about_modes(analysis, notes);
+  about_bands(analysis, notes);
+  if (analysis.seismic) {
+    about_spectra(analysis, notes);
+    about_combination(analysis, notes);
+  }
+  about_unused(analysis, notes);
+  return notes;
+}
+
+}  // namespace swaymark

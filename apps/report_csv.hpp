@@ -1,0 +1,19 @@
+#pragma once
+
+#include <string>
+#include <vector>
+
+#include "apps/analysis.hpp"
+
+namespace swaymark {
+
+struct NamedText {
+  std::string name;
+  std::string text;
+};
+
+/// The results as CSV files (RFC 4180, comma, '.', SI, units in brackets in the header): modes, ledger, and
+/// where they apply bands, ordinates, bars, nodes, reactions, verdicts, and shapes where asked for.
+[[nodiscard]] std::vector<NamedText> csv_report(const Analysis& analysis, bool shapes);
+
+}  // namespace swaymark

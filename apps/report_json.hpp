@@ -1,0 +1,14 @@
+#pragma once
+
+#include <string>
+
+#include "apps/analysis.hpp"
+
+namespace swaymark {
+
+/// The results as JSON, SI throughout, numbers in the shortest form that reads back the same.
+/// A tower that can move has its mechanisms instead of modes.
+/// \param shapes whether the mode shapes are written.
+[[nodiscard]] std::string json_report(const Analysis& analysis, bool shapes);
+
+}  // namespace swaymark

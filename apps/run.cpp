@@ -1,0 +1,110 @@
+#include "apps/run.hpp"
+
+#include <algorithm>
+#include <cstdio>
+#include <cstdlib>
+#include <exception>
+#include <new>
+#include <string_view>
+
+#include <fmt/format.h>
+#include <unistd.h>
+
+#include "apps/command_line.hpp"
+#include "apps/exit_status.hpp"
+#include "apps/output_file.hpp"
+#include "apps/report_csv.hpp"
+#include "apps/report_json.hpp"
+#include "apps/report_text.hpp"
+#include "core/tower_file.hpp"
+
+namespace swaymark {
+
+namespace {
+
+constexpr std::size_t kMostBytes = std::size_t{64} << 20U;
+
+void to_standard_error(std::string_view text) { std::fwrite(text.data(), 1, text.size(), stderr); }
+
+bool wants_colour(ColourChoice choice) {
+  if (choice != ColourChoice::automatic) return choice == ColourChoice::always;
+  const auto variable = [](const char* name) {
+    const char* value = std::getenv(name);
+    return std::string_view(value != nullptr ? value : "");
+  };
+  return isatty(STDOUT_FILENO) != 0 && variable("NO_COLOR").empty() && variable("TERM") != "dumb";
+}
+
+int status_of(const Analysis& analysis) {
+  if (analysis.mechanisms.any()) return kNotComputable;
+  const bool all_met =
+      std::all_of(analysis.verdicts.begin(), analysis.verdicts.end(), [](const Verdict& v) { return v.met; });
+  return all_met ? kAllMet : kNotMet;
+}
+
+void write_results(const Command& command, const Analysis& analysis) {
+  OutputFiles files;
+  const bool json_to_output = command.json && *command.json == "-";
+  const std::string json = command.json ? json_report(analysis, command.shapes) : std::string();
+  if (command.json && !json_to_output) files.stage(*command.json, json);
+  if (command.csv && !analysis.mechanisms.any()) {
+    files.stage_folder(*command.csv);
+    for (NamedText& sheet : csv_report(analysis, command.shapes))
+      files.stage(*command.csv + "/" + sheet.name, std::move(sheet.text));
+  }
+  files.commit();
+  if (json_to_output) {
+    write_standard_output(json);
+  } else if (!analysis.mechanisms.any()) {
+    write_standard_output(text_report(analysis, {wants_colour(command.colour)}));
+  }
+}
+
+int run_command(const Command& command) {
+  const std::string name = command.tower == "-" ? "standard input" : command.tower;
+  const std::string bytes = read_file(command.tower, kMostBytes);
+  const Analysis analysis = analyse(read_tower(bytes, name), provenance_of(name, bytes), command.scope);
+  if (analysis.mechanisms.any()) to_standard_error(mechanism_text(analysis));
+  write_results(command, analysis);
+  return status_of(analysis);
+}
+
+void report_faults(const InputError& error) {
+  constexpr std::size_t most = 100;
+  const auto& faults = error.faults();
+  for (std::size_t i = 0; i < std::min(faults.size(), most); ++i)
+    to_standard_error(to_string(faults[i]) + "\n");
+  if (faults.size() > most)
+    to_standard_error(
+        fmt::format("... and {} more faults in {}\n", faults.size() - most, faults.front().file));
+}
+
+}  // namespace
+
+int run(int argc, const char* const* argv) {
+  try {
+    const Parsed parsed = parse_command_line(argc, argv);
+    if (!parsed.error.empty()) to_standard_error(parsed.error + "\n");
+    if (!parsed.output.empty()) write_standard_output(parsed.output);
+    return parsed.command ? run_command(*parsed.command) : parsed.status;
+  } catch (const InputError& error) {
+    report_faults(error);
+    return kRefused;
+  } catch (const ComputationError& error) {
+    to_standard_error(fmt::format("swaymark: {}\n", error.what()));
+    return kNotComputable;
+  } catch (const FileError& error) {
+    to_standard_error(fmt::format("{}\n", error.what()));
+    return kFileTrouble;
+  } catch (const std::bad_alloc&) {
+    to_standard_error("swaymark: out of memory; use a machine with more memory, or a smaller model\n");
+    return kNotComputable;
+  } catch (const std::exception& error) {
+    to_standard_error(
+        fmt::format("swaymark: an error of the program itself: {}; please report it with the tower file\n",
+                    error.what()));
+    return kOurFault;
+  }
+}
+
+}  // namespace swaymark

@@ -1,0 +1,72 @@
+#include "apps/table.hpp"
+
+#include <algorithm>
+#include <sstream>
+
+namespace swaymark {
+
+namespace {
+
+std::string padded(const std::string& cell, std::size_t width, Table::Align align) {
+  const std::string blanks(width - std::min(width, columns_of(cell)), ' ');
+  return align == Table::Align::left ? cell + blanks : blanks + cell;
+}
+
+}  // namespace
+
+std::size_t columns_of(const std::string& text) {
+  return static_cast<std::size_t>(std::count_if(
+      text.begin(), text.end(), [](char c) { return (static_cast<unsigned char>(c) & 0xC0U) != 0x80U; }));
+}
+
+std::string Table::text() const {
+  std::size_t head_lines = 0;
+  std::vector<std::size_t> widths;
+  for (std::size_t c = 0; c < columns_.size(); ++c) {
+    std::size_t width = 0;
+    for (const auto& line : columns_[c].head) width = std::max(width, columns_of(line));
+    for (const auto& row : rows_) width = std::max(width, columns_of(row[c]));
+    widths.push_back(width);
+    head_lines = std::max(head_lines, columns_[c].head.size());
+  }
+  std::string result;
+  const auto add_line = [&](const auto& cell_of) {
+    std::string line;
+    for (std::size_t c = 0; c < columns_.size(); ++c)
+      line += "  " + padded(cell_of(c), widths[c], columns_[c].align);
+    line.erase(line.find_last_not_of(' ') + 1);
+    result += line + "\n";
+  };
+  for (std::size_t l = 0; l < head_lines; ++l) {
+    add_line([&](std::size_t c) {
+      const auto& head = columns_[c].head;
+      // A short heading stands on the last line, next to the figures.
+      const std::size_t missing = head_lines - head.size();
+      return l < missing ? std::string() : head[l - missing];
+    });
+  }
+  for (const auto& row : rows_) {
+    add_line([&](std::size_t c) { return row[c]; });
+  }
+  return result;
+}
+
+std::string wrapped(const std::string& text, const std::string& lead, std::size_t width) {
+  std::istringstream words(text);
+  std::string result;
+  std::string line = lead;
+  bool fresh = true;
+  for (std::string word; words >> word;) {
+    if (!fresh && columns_of(line) + 1 + columns_of(word) > width) {
+      result += line + "\n";
+      line = std::string(columns_of(lead), ' ');
+      fresh = true;
+    }
+    if (!fresh) line += ' ';
+    line += word;
+    fresh = false;
+  }
+  return result + line + "\n";
+}
+
+}  // namespace swaymark

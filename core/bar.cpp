@@ -1,0 +1,48 @@
+#include "core/bar.hpp"
+
+namespace swaymark {
+
+MassShares mass_shares(MassScheme scheme) {
+  switch (scheme) {
+    case MassScheme::consistent:
+      return {1.0 / 3.0, 1.0 / 6.0};
+    case MassScheme::lumped:
+      return {1.0 / 2.0, 0.0};
+    case MassScheme::averaged:
+      return {5.0 / 12.0, 1.0 / 12.0};
+  }
+  return {};
+}
+
+std::vector<BarElement> bar_elements(const Tower& tower) {
+  std::vector<double> per_length(tower.groups.size(), 0.0);
+  std::vector<double> share(tower.groups.size(), 0.0);
+  const auto spread = [](std::vector<double>& values, std::optional<std::size_t> group, double value) {
+    for (std::size_t g = 0; g < values.size(); ++g) {
+      if (!group || *group == g) values[g] += value;
+    }
+  };
+  for (const LineMass& mass : tower.line_masses) spread(per_length, mass.group, mass.per_length);
+  for (const Allowance& allowance : tower.allowances) spread(share, allowance.group, allowance.share);
+
+  std::vector<BarElement> elements;
+  elements.reserve(tower.bars.size());
+  for (const Bar& bar : tower.bars) {
+    const Group& group = tower.groups[bar.group];
+    const Material& material = tower.materials[group.material];
+    const double area = tower.sections[group.section].area;
+    const Eigen::Vector3d span = tower.nodes[bar.to].position - tower.nodes[bar.from].position;
+    BarElement element;
+    element.from = bar.from;
+    element.to = bar.to;
+    element.length = span.norm();
+    element.direction = span / element.length;
+    element.axial_stiffness = material.youngs_modulus * area / element.length;
+    element.own_mass = material.density * area * element.length;
+    element.carried_mass = share[bar.group] * element.own_mass + per_length[bar.group] * element.length;
+    elements.push_back(element);
+  }
+  return elements;
+}
+
+}  // namespace swaymark

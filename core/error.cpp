@@ -1,0 +1,40 @@
+#include "core/error.hpp"
+
+#include <algorithm>
+#include <tuple>
+
+#include <fmt/format.h>
+
+namespace swaymark {
+
+namespace {
+
+std::string joined(const Message& message) {
+  return message.cure.empty() ? message.what : fmt::format("{}; {}", message.what, message.cure);
+}
+
+}  // namespace
+
+std::string to_string(const Fault& fault) {
+  if (!fault.place.known()) return fmt::format("{}: {}", fault.file, joined(fault.message));
+  return fmt::format("{}:{}:{}: {}", fault.file, fault.place.line, fault.place.column, joined(fault.message));
+}
+
+InputError::InputError(std::vector<Fault> faults) : faults_(std::move(faults)) {
+  for (const Fault& fault : faults_) {
+    if (!text_.empty()) text_ += '\n';
+    text_ += to_string(fault);
+  }
+}
+
+ComputationError::ComputationError(Message message) : message_(std::move(message)), text_(joined(message_)) {}
+
+void FaultList::throw_if_any() {
+  if (faults_.empty()) return;
+  std::stable_sort(faults_.begin(), faults_.end(), [](const Fault& a, const Fault& b) {
+    return std::tie(a.place.line, a.place.column) < std::tie(b.place.line, b.place.column);
+  });
+  throw InputError(std::move(faults_));
+}
+
+}  // namespace swaymark

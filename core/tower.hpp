@@ -1,0 +1,129 @@
+#pragma once
+
+#include <array>
+#include <cstddef>
+#include <optional>
+#include <string>
+#include <vector>
+
+#include <Eigen/Core>
+
+#include "core/axis.hpp"
+#include "core/error.hpp"
+#include "core/request.hpp"
+
+/// The tower as the engineer states it: a value, SI units throughout (m, kg, s, N, Pa, Hz).
+///
+/// References between parts are indices into the tower's own lists. Each part keeps the place it was read
+/// from so that a fault found later can still be shown in the file.
+namespace swaymark {
+
+struct Material {
+  std::string name;
+  double youngs_modulus = 0.0;  ///< E [Pa] > 0
+  double density = 0.0;         ///< [kg/m3] >= 0
+  std::optional<double> yield;  ///< [Pa]
+  Place place;
+};
+
+struct Section {
+  std::string name;
+  double area = 0.0;                 ///< [m2] > 0
+  std::optional<double> radius;      ///< smallest radius of gyration [m]
+  std::optional<std::string> curve;  ///< buckling curve a0, a, b, c, d (EN 1993-1-1)
+  Place place;
+};
+
+struct Node {
+  std::string name;
+  Eigen::Vector3d position = Eigen::Vector3d::Zero();  ///< [m]; axes the tower does not have are 0
+  Place place;
+};
+
+/// Bars that share a section and a material.
+struct Group {
+  std::string name;
+  std::size_t section = 0;
+  std::size_t material = 0;
+  Place place;
+};
+
+struct Bar {
+  std::size_t group = 0;
+  std::size_t from = 0;
+  std::size_t to = 0;
+  std::size_t number = 0;  ///< within its group, from 1
+  Place place;
+};
+
+/// What holds one node: an axis is fixed, on a spring to the ground, or free.
+struct Support {
+  std::size_t node = 0;
+  std::array<bool, 3> fixed{};
+  std::array<double, 3> spring{};  ///< [N/m]; 0 where there is none
+  Place place;
+};
+
+/// A carried mass shared equally by nodes (a discrete ancillary).
+struct NodeMass {
+  std::vector<std::size_t> nodes;
+  double total = 0.0;  ///< [kg] for all nodes together
+  std::string label;
+  Place place;
+};
+
+/// A carried mass along bars that moves with them as their own mass does (a linear ancillary).
+struct LineMass {
+  std::optional<std::size_t> group;  ///< every bar where empty
+  double per_length = 0.0;           ///< [kg/m]
+  std::string label;
+  Place place;
+};
+
+/// A share of the bars' own mass: bolts, gussets, paint.
+struct Allowance {
+  std::optional<std::size_t> group;  ///< every bar where empty
+  double share = 0.0;                ///< fraction of the bars' own mass
+  std::string label;
+  Place place;
+};
+
+enum class MassScheme { consistent, lumped, averaged };
+
+struct Tower {
+  std::string file;  ///< the name it was read from, for messages and reports
+  std::string title;
+  int dimensions = 3;
+
+  std::vector<Material> materials;
+  std::vector<Section> sections;
+  std::vector<Node> nodes;
+  std::vector<Group> groups;
+  std::vector<Bar> bars;
+  std::vector<Support> supports;  ///< at most one per node
+  std::vector<NodeMass> node_masses;
+  std::vector<LineMass> line_masses;
+  std::vector<Allowance> allowances;
+
+  MassScheme mass_scheme = MassScheme::consistent;
+  std::vector<double>
+      damping;  ///< fractions of critical: one for every mode, or mode by mode; empty: not given
+
+  ModeRequest modes;
+  std::vector<BandStatement> bands;
+  std::vector<SpectrumStatement> spectra;
+  std::optional<SeismicStatement> seismic;
+
+  [[nodiscard]] std::vector<Axis> axes() const { return axes_of(dimensions); }
+  /// `legs-3`
+  [[nodiscard]] std::string bar_name(std::size_t bar) const;
+  /// The tower's extent [m]: the diagonal of the box around its nodes.
+  [[nodiscard]] double extent() const;
+};
+
+[[nodiscard]] std::string_view name_of(MassScheme scheme);
+[[nodiscard]] std::string_view name_of(ModalRule rule);
+[[nodiscard]] std::string_view name_of(DirectionalRule rule);
+[[nodiscard]] std::string_view name_of(BandDirection direction);
+
+}  // namespace swaymark

@@ -1,0 +1,14 @@
+#pragma once
+
+#include "core/tower.hpp"
+#include "core/tower_file_values.hpp"
+
+/// The keys of a tower file that ask for something: modes, bands, spectra, seismic. Private to the reader.
+namespace swaymark {
+
+void read_modes(MapView& file, Tower& tower);
+void read_bands(MapView& file, Tower& tower);
+void read_spectra(MapView& file, Tower& tower, NameTable& names);
+void read_seismic(MapView& file, Tower& tower, const NameTable& spectra);
+
+}  // namespace swaymark

@@ -1,0 +1,202 @@
+#include "core/yaml_document.hpp"
+
+#include <istream>
+#include <streambuf>
+#include <unordered_map>
+
+#include <fmt/format.h>
+#include <yaml-cpp/depthguard.h>
+#include <yaml-cpp/eventhandler.h>
+#include <yaml-cpp/exceptions.h>
+#include <yaml-cpp/mark.h>
+#include <yaml-cpp/parser.h>
+
+#include "core/text.hpp"
+#include "core/wording.hpp"
+
+namespace swaymark {
+
+namespace {
+
+Place place_of(const YAML::Mark& mark) {
+  if (mark.is_null()) return {};
+  return {static_cast<std::uint32_t>(mark.line + 1), static_cast<std::uint32_t>(mark.column + 1)};
+}
+
+// A stream over the text itself, without a copy.
+class TextBuffer : public std::streambuf {
+ public:
+  explicit TextBuffer(std::string_view text) {
+    char* begin = const_cast<char*>(text.data());  // NOLINT: streambuf wants char*, it is only read
+    setg(begin, begin, begin + text.size());
+  }
+};
+
+// Builds the tree from the parser's events and stops at the first event past a limit, so that neither deep
+// nesting nor aliases of aliases cost more than the limit allows.
+class TreeBuilder : public YAML::EventHandler {
+ public:
+  TreeBuilder(std::string file, const YamlLimits& limits) : file_(std::move(file)), limits_(limits) {}
+
+  YamlNode take_root() { return std::move(root_); }
+
+  void OnDocumentStart(const YAML::Mark& /*mark*/) override {}
+  void OnDocumentEnd() override {}
+
+  void OnNull(const YAML::Mark& mark, YAML::anchor_t anchor) override {
+    add(make(YamlNode::Kind::null, mark), anchor);
+  }
+  void OnScalar(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
+                const std::string& value) override {
+    refuse_tag(mark, tag);
+    YamlNode node = make(YamlNode::Kind::scalar, mark);
+    node.text = value;
+    add(std::move(node), anchor);
+  }
+  void OnAlias(const YAML::Mark& mark, YAML::anchor_t anchor) override {
+    const auto found = anchors_.find(anchor);
+    if (found == anchors_.end()) refuse(mark, wording::alias_to_itself());
+    nodes_ += found->second.size;
+    check_size(mark);
+    YamlNode copy = found->second.node;
+    copy.place = place_of(mark);
+    attach(std::move(copy));
+  }
+  void OnSequenceStart(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
+                       YAML::EmitterStyle::value /*style*/) override {
+    open(YamlNode::Kind::sequence, mark, tag, anchor);
+  }
+  void OnMapStart(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
+                  YAML::EmitterStyle::value /*style*/) override {
+    open(YamlNode::Kind::map, mark, tag, anchor);
+  }
+  void OnSequenceEnd() override { close(); }
+  void OnMapEnd() override { close(); }
+
+ private:
+  struct Open {
+    YamlNode node;
+    YAML::anchor_t anchor = 0;
+    std::size_t nodes_before = 0;
+  };
+  struct Anchored {
+    YamlNode node;
+    std::size_t size = 0;
+  };
+
+  [[noreturn]] void refuse(const YAML::Mark& mark, Message message) const {
+    throw InputError({{file_, place_of(mark), std::move(message)}});
+  }
+  void refuse_tag(const YAML::Mark& mark, const std::string& tag) const {
+    if (!tag.empty() && tag != "?" && tag != "!") refuse(mark, wording::tag_not_used(tag));
+  }
+  void check_size(const YAML::Mark& mark) const {
+    if (nodes_ > limits_.nodes) refuse(mark, wording::too_many_values(limits_.nodes));
+  }
+  YamlNode make(YamlNode::Kind kind, const YAML::Mark& mark) {
+    ++nodes_;
+    check_size(mark);
+    YamlNode node;
+    node.kind = kind;
+    node.place = place_of(mark);
+    return node;
+  }
+  void open(YamlNode::Kind kind, const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor) {
+    refuse_tag(mark, tag);
+    if (open_.size() >= limits_.depth) refuse(mark, wording::too_deep(limits_.depth));
+    const std::size_t before = nodes_;
+    open_.push_back({make(kind, mark), anchor, before});
+  }
+  void close() {
+    Open done = std::move(open_.back());
+    open_.pop_back();
+    if (done.anchor != 0) {
+      const std::size_t size = nodes_ - done.nodes_before;
+      nodes_ += size;  // the copy kept for the aliases counts too
+      if (nodes_ > limits_.nodes)
+        throw InputError({{file_, done.node.place, wording::too_many_values(limits_.nodes)}});
+      anchors_[done.anchor] = {done.node, size};
+    }
+    attach(std::move(done.node));
+  }
+  void add(YamlNode node, YAML::anchor_t anchor) {
+    if (anchor != 0) anchors_[anchor] = {node, 1};
+    attach(std::move(node));
+  }
+  void attach(YamlNode node) {
+    if (open_.empty()) {
+      root_ = std::move(node);
+    } else {
+      open_.back().node.items.push_back(std::move(node));
+    }
+  }
+
+  std::string file_;
+  YamlLimits limits_;
+  std::size_t nodes_ = 0;
+  std::vector<Open> open_;
+  std::unordered_map<YAML::anchor_t, Anchored> anchors_;
+  YamlNode root_;
+};
+
+// Keys must be scalars and stand once in their map.
+void check_keys(const YamlNode& node, FaultList& faults) {
+  if (node.kind == YamlNode::Kind::map) {
+    std::unordered_map<std::string_view, Place> seen;
+    for (std::size_t i = 0; i + 1 < node.items.size(); i += 2) {
+      const YamlNode& key = node.items[i];
+      if (key.kind != YamlNode::Kind::scalar) {
+        faults.add(key.place.known() ? key.place : node.place, wording::key_is_no_word(key.description()));
+        continue;
+      }
+      const auto [first, fresh] = seen.emplace(key.text, key.place);
+      if (!fresh) faults.add(key.place, wording::key_twice(key.text, first->second));
+    }
+  }
+  for (const YamlNode& item : node.items) check_keys(item, faults);
+}
+
+}  // namespace
+
+std::string YamlNode::description() const {
+  switch (kind) {
+    case Kind::null:
+      return "nothing";
+    case Kind::scalar:
+      return "'" + excerpt(text) + "'";
+    case Kind::sequence:
+      return "a list";
+    case Kind::map:
+      return "a map";
+  }
+  return {};
+}
+
+YamlNode parse_yaml(std::string_view text, const std::string& file, FaultList& faults,
+                    const YamlLimits& limits) {
+  const auto refuse = [&](Place place, Message message) {
+    throw InputError({{file, place, std::move(message)}});
+  };
+  if (text.size() > limits.bytes) refuse({}, wording::file_too_long(text.size(), limits.bytes));
+  if (text.starts_with("\xEF\xBB\xBF")) text.remove_prefix(3);  // a byte-order mark says nothing in UTF-8
+  if (const auto place = first_invalid_character(text)) refuse(*place, wording::invalid_character());
+
+  TextBuffer buffer(text);
+  std::istream stream(&buffer);
+  TreeBuilder builder(file, limits);
+  try {
+    YAML::Parser parser(stream);
+    if (!parser.HandleNextDocument(builder)) refuse({1, 1}, wording::empty_file());
+    TreeBuilder next(file, limits);
+    if (parser.HandleNextDocument(next)) refuse({}, wording::several_documents());
+  } catch (const YAML::DeepRecursion& error) {
+    refuse(place_of(error.mark), wording::too_deep(limits.depth));
+  } catch (const YAML::Exception& error) {
+    refuse(place_of(error.mark), wording::not_yaml(error.msg));
+  }
+  YamlNode root = builder.take_root();
+  check_keys(root, faults);
+  return root;
+}
+
+}  // namespace swaymark

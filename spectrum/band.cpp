@@ -1,0 +1,64 @@
+#include "spectrum/band.hpp"
+
+#include <algorithm>
+
+namespace swaymark {
+
+namespace {
+
+double ratio_along(BandDirection direction, const Eigen::Vector3d& ratio) {
+  switch (direction) {
+    case BandDirection::x:
+      return ratio.x();
+    case BandDirection::y:
+      return ratio.y();
+    case BandDirection::z:
+      return ratio.z();
+    case BandDirection::horizontal:
+      return std::max(ratio.x(), ratio.y());
+    case BandDirection::any:
+      return ratio.maxCoeff();
+  }
+  return 0.0;
+}
+
+}  // namespace
+
+std::string_view name_of(BandVerdict verdict) {
+  switch (verdict) {
+    case BandVerdict::clear:
+      return "clear";
+    case BandVerdict::close:
+      return "close";
+    case BandVerdict::inside:
+      return "inside";
+  }
+  return "";
+}
+
+double band_reach(const BandStatement& band) { return band.to * (1.0 + band.margin); }
+
+BandResult examine_band(const BandStatement& band, const Eigen::VectorXd& frequency,
+                        const Eigen::MatrixXd& mass_ratio) {
+  BandResult result;
+  for (Index mode = 0; mode < frequency.size(); ++mode) {
+    const double f = frequency(mode);
+    const bool inside = f >= band.from && f <= band.to;
+    const bool near = f >= band.from * (1.0 - band.margin) && f <= band_reach(band);
+    if (!near) continue;
+    const bool counts = ratio_along(band.direction, mass_ratio.row(mode).transpose()) >= kCountsForBand;
+    if (!counts) {
+      result.slight.push_back(mode);
+    } else {
+      (inside ? result.inside : result.close).push_back(mode);
+    }
+  }
+  if (!result.inside.empty()) {
+    result.verdict = BandVerdict::inside;
+  } else if (!result.close.empty()) {
+    result.verdict = BandVerdict::close;
+  }
+  return result;
+}
+
+}  // namespace swaymark

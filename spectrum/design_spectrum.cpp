@@ -1,0 +1,44 @@
+#include "spectrum/design_spectrum.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+namespace swaymark {
+
+double damping_correction(double damping) {
+  return std::max(0.55, std::sqrt(10.0 / (5.0 + 100.0 * damping)));
+}
+
+DesignSpectrum::DesignSpectrum(SpectrumStatement statement, double factor)
+    : statement_(std::move(statement)), factor_(factor) {}
+
+double DesignSpectrum::ordinate(double period) const {
+  const auto& points = statement_.points;
+  if (period <= points.front().first) return factor_ * points.front().second;
+  if (period >= points.back().first) return factor_ * points.back().second;
+  const auto above = std::upper_bound(points.begin(), points.end(), period,
+                                      [](double t, const auto& point) { return t < point.first; });
+  const auto [t0, a0] = *(above - 1);
+  const auto [t1, a1] = *above;
+  if (statement_.interpolation == Interpolation::log_log) {
+    const double share = std::log(period / t0) / std::log(t1 / t0);
+    return factor_ * a0 * std::pow(a1 / a0, share);
+  }
+  return factor_ * (a0 + (a1 - a0) * (period - t0) / (t1 - t0));
+}
+
+double DesignSpectrum::acceleration(double period, double damping) const {
+  const double plain = ordinate(period);
+  if (!statement_.damping_correction) return plain;
+  return plain * damping_correction(damping) / damping_correction(*statement_.damping);
+}
+
+bool DesignSpectrum::covers(double period) const {
+  return period >= statement_.points.front().first && period <= statement_.points.back().first;
+}
+
+bool DesignSpectrum::differs_in_damping(double damping) const {
+  return statement_.damping && std::abs(*statement_.damping - damping) > 1e-9;
+}
+
+}  // namespace swaymark
