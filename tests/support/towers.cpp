@@ -1,0 +1,122 @@
+#include "tests/support/towers.hpp"
+
+#include <cmath>
+#include <numbers>
+
+namespace swaymark::test {
+
+Tower bare_tower(int dimensions, double area) {
+  Tower tower;
+  tower.file = "made by a test";
+  tower.dimensions = dimensions;
+  tower.materials.push_back({"steel", 210e9, 7850.0, {}, {}});
+  tower.sections.push_back({"bar", area, {}, {}, {}});
+  tower.groups.push_back({"bars", 0, 0, {}});
+  tower.modes.mass_share = 0.9;
+  return tower;
+}
+
+std::size_t add_node(Tower& tower, const Eigen::Vector3d& position) {
+  tower.nodes.push_back({std::to_string(tower.nodes.size() + 1), position, {}});
+  return tower.nodes.size() - 1;
+}
+
+void add_bar(Tower& tower, std::size_t from, std::size_t to) {
+  const std::size_t group = tower.groups.size() - 1;
+  std::size_t number = 1;
+  for (const Bar& bar : tower.bars) {
+    if (bar.group == group) ++number;
+  }
+  tower.bars.push_back({group, from, to, number, {}});
+}
+
+void fix(Tower& tower, std::size_t node) {
+  Support support;
+  support.node = node;
+  for (const Axis axis : tower.axes()) support.fixed[static_cast<std::size_t>(axis)] = true;
+  tower.supports.push_back(support);
+}
+
+void carry(Tower& tower, std::size_t node, double mass) {
+  tower.node_masses.push_back({{node}, mass, "", {}});
+}
+
+Tower rod(int elements, double length, MassScheme scheme) {
+  Tower tower = bare_tower(1);
+  tower.mass_scheme = scheme;
+  for (int i = 0; i <= elements; ++i) add_node(tower, {length * i / elements, 0.0, 0.0});
+  for (std::size_t i = 0; i + 1 < tower.nodes.size(); ++i) add_bar(tower, i, i + 1);
+  fix(tower, 0);
+  return tower;
+}
+
+Tower regular_mast(const Mast& mast) {
+  Tower tower = bare_tower(3);
+  const auto legs = static_cast<std::size_t>(mast.legs);
+  std::vector<std::size_t> below;
+  for (int level = 0; level <= mast.panels; ++level) {
+    const double share = static_cast<double>(level) / mast.panels;
+    const double radius = mast.radius + share * (mast.top_radius - mast.radius);
+    std::vector<std::size_t> ring;
+    for (std::size_t k = 0; k < legs; ++k) {
+      const double angle = mast.turn + 2.0 * std::numbers::pi * static_cast<double>(k) / mast.legs;
+      ring.push_back(
+          add_node(tower, {radius * std::cos(angle), radius * std::sin(angle), level * mast.panel_height}));
+    }
+    if (level == 0) {
+      for (const std::size_t node : ring) fix(tower, node);
+    } else {
+      for (std::size_t k = 0; k < legs; ++k) {
+        const std::size_t next = (k + 1) % legs;
+        add_bar(tower, below[k], ring[k]);
+        add_bar(tower, below[k], ring[next]);
+        add_bar(tower, below[next], ring[k]);
+        add_bar(tower, ring[k], ring[next]);
+      }
+      // A hub held by the ring and, against lifting, by the ring below.
+      if (legs > 3) {
+        const std::size_t hub = add_node(tower, {0.0, 0.0, level * mast.panel_height});
+        for (std::size_t k = 0; k < legs; ++k) {
+          add_bar(tower, hub, ring[k]);
+          add_bar(tower, hub, below[k]);
+        }
+      }
+    }
+    below = ring;
+  }
+  NodeMass top;
+  top.nodes = below;
+  top.total = mast.top_mass;
+  if (mast.top_mass > 0.0) tower.node_masses.push_back(top);
+  return tower;
+}
+
+Tower random_truss(int dimensions, int free_nodes, std::mt19937& random) {
+  std::uniform_real_distribution<double> unit(0.0, 1.0);
+  Tower tower = bare_tower(dimensions);
+  tower.groups.clear();
+  tower.sections.clear();
+  const auto place = [&]() {
+    Eigen::Vector3d position = Eigen::Vector3d::Zero();
+    for (const Axis axis : tower.axes()) position[index_of(axis)] = 10.0 * unit(random);
+    return position;
+  };
+  const int anchors = dimensions + 1;
+  for (int i = 0; i < anchors; ++i) fix(tower, add_node(tower, place()));
+  for (int i = 0; i < free_nodes; ++i) {
+    const std::size_t node = add_node(tower, place());
+    tower.sections.push_back({"s" + std::to_string(i), 1e-4 + 4e-3 * unit(random), {}, {}, {}});
+    tower.groups.push_back({"g" + std::to_string(i), tower.sections.size() - 1, 0, {}});
+    // Bars to any `dimensions + 1` earlier nodes hold the new one: random directions do not lie in a plane.
+    for (std::size_t k = 1; k <= static_cast<std::size_t>(anchors); ++k) {
+      const std::size_t step = std::uniform_int_distribution<std::size_t>(
+          0, (node - 1) / static_cast<std::size_t>(anchors))(random);
+      const std::size_t first = (k - 1) + step * static_cast<std::size_t>(anchors);
+      if (first < node) add_bar(tower, first, node);
+    }
+    if (unit(random) < 0.3) carry(tower, node, 500.0 * unit(random));
+  }
+  return tower;
+}
+
+}  // namespace swaymark::test
