@@ -6,6 +6,7 @@
 
 #include <fmt/format.h>
 
+#include "apps/notes.hpp"
 #include "modal/damping.hpp"
 #include "modal/mode_character.hpp"
 #include "modal/participation.hpp"
@@ -108,23 +109,15 @@ void describe_modes(Analysis& analysis) {
 }  // namespace
 
 std::vector<Index> Analysis::excited() const {
-  std::vector<Index> places;
+  std::vector<Index> shaken;
+  std::vector<Index> horizontal;
   const auto axes = tower.axes();
-  const auto band_asks = [&](Axis axis) {
-    return std::any_of(tower.bands.begin(), tower.bands.end(), [&](const BandStatement& band) {
-      const bool horizontal = band.direction == BandDirection::horizontal && axis != Axis::z;
-      return horizontal || name_of(band.direction) == name_of(axis);
-    });
-  };
   for (std::size_t k = 0; k < axes.size(); ++k) {
-    const bool shaken = tower.seismic && tower.seismic->spectrum[static_cast<std::size_t>(axes[k])];
-    if (shaken || band_asks(axes[k])) places.push_back(static_cast<Index>(k));
+    if (tower.seismic && tower.seismic->spectrum[static_cast<std::size_t>(axes[k])])
+      shaken.push_back(static_cast<Index>(k));
+    if (axes[k] != Axis::z) horizontal.push_back(static_cast<Index>(k));
   }
-  if (!places.empty()) return places;
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    if (axes[k] != Axis::z) places.push_back(static_cast<Index>(k));
-  }
-  return places;
+  return shaken.empty() ? horizontal : shaken;
 }
 
 Analysis analyse(Tower tower, Provenance provenance, Scope scope) {

@@ -5,6 +5,7 @@
 #include <vector>
 
 #include "apps/provenance.hpp"
+#include "apps/verdicts.hpp"
 #include "core/mass_ledger.hpp"
 #include "core/mechanism.hpp"
 #include "core/tower.hpp"
@@ -13,13 +14,6 @@
 #include "spectrum/seismic.hpp"
 
 namespace swaymark {
-
-/// One check and its outcome.
-struct Verdict {
-  std::string check;
-  bool met = false;
-  std::string detail;
-};
 
 /// How far an analysis goes.
 enum class Scope {
@@ -48,19 +42,13 @@ struct Analysis {
   std::vector<std::string> notes;
 
   [[nodiscard]] Index mode_count() const { return frequency.size(); }
-  /// The directions whose mass share is asked for: those with a spectrum and those of bands; without any, the
-  /// horizontal ones. As places among the tower's axes.
+  /// The directions whose mass share is asked for: those with a spectrum; without any, the horizontal ones.
+  /// As places among the tower's axes.
   [[nodiscard]] std::vector<Index> excited() const;
 };
 
 /// Runs the analysis. A tower that can move comes back with its mechanisms and without modes.
 /// \throws ComputationError where nothing can be computed for another reason.
 [[nodiscard]] Analysis analyse(Tower tower, Provenance provenance, Scope scope);
-
-/// The outcome of every check the tower file asks for.
-[[nodiscard]] std::vector<Verdict> verdicts_of(const Analysis& analysis);
-
-/// What a reader of the results must know besides the figures.
-[[nodiscard]] std::vector<std::string> notes_of(const Analysis& analysis);
 
 }  // namespace swaymark

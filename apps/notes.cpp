@@ -1,9 +1,10 @@
+#include "apps/notes.hpp"
+
 #include <algorithm>
 #include <cmath>
 
 #include <fmt/format.h>
 
-#include "apps/analysis.hpp"
 #include "apps/report_parts.hpp"
 
 namespace swaymark {
@@ -114,14 +115,16 @@ void about_combination(const Analysis& analysis, Notes& notes) {
         name_of(ratio.axis), ratio.base_shear, ratio.least_bar, ratio.most_bar));
   }
   std::string lifted;
+  int supports = 0;
   for (const NodeReaction& reaction : node_reactions(analysis)) {
     if (reaction.uplift.value_or(0.0) <= 0.0) continue;
+    ++supports;
     lifted += (lifted.empty() ? "" : ", ") + analysis.tower.nodes[reaction.node].name;
   }
   if (!lifted.empty()) {
-    notes.push_back(fmt::format(
-        "Gravity - seismic lifts the supports at node {}: the anchorage must hold the uplift listed.",
-        lifted));
+    notes.push_back(
+        fmt::format("Gravity - seismic lifts the {} {}: the anchorage must hold the uplift listed.",
+                    supports == 1 ? "support at node" : "supports at nodes", lifted));
   }
 }
 

@@ -13,7 +13,4 @@ struct TextStyle {
 /// The report for an engineer's file: plain text, at most 100 columns wide where names are of common length.
 [[nodiscard]] std::string text_report(const Analysis& analysis, const TextStyle& style);
 
-/// What can move, for standard error.
-[[nodiscard]] std::string mechanism_text(const Analysis& analysis);
-
 }  // namespace swaymark

@@ -15,6 +15,7 @@
 #include "apps/output_file.hpp"
 #include "apps/report_csv.hpp"
 #include "apps/report_json.hpp"
+#include "apps/report_mechanism.hpp"
 #include "apps/report_text.hpp"
 #include "core/tower_file.hpp"
 

@@ -51,6 +51,8 @@ std::string Table::text() const {
   return result;
 }
 
+std::string section_head(const std::string& words) { return "\n" + words + "\n"; }
+
 std::string wrapped(const std::string& text, const std::string& lead, std::size_t width) {
   std::istringstream words(text);
   std::string result;

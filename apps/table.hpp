@@ -25,6 +25,12 @@ class Table {
   std::vector<std::vector<std::string>> rows_;
 };
 
+/// Width [columns] of running text in reports.
+inline constexpr std::size_t kTextWidth = 88;
+
+/// A heading after an empty line.
+[[nodiscard]] std::string section_head(const std::string& words);
+
 /// `text` broken at blanks into lines of at most `width` columns; the first begins with `lead`, the others
 /// with as many blanks.
 [[nodiscard]] std::string wrapped(const std::string& text, const std::string& lead, std::size_t width);

@@ -1,3 +1,5 @@
+#include "apps/verdicts.hpp"
+
 #include <numbers>
 
 #include <fmt/format.h>

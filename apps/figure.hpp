@@ -1,0 +1,17 @@
+#pragma once
+
+#include <string>
+
+/// Figures as a report prints them.
+namespace swaymark {
+
+/// A number with so many decimals, and without a minus sign before a rounded zero.
+[[nodiscard]] std::string figure(double value, int decimals);
+/// A ratio in percent with one decimal.
+[[nodiscard]] std::string percent(double ratio);
+/// N in kN, N m in kN m, with two decimals.
+[[nodiscard]] std::string kilo(double value);
+/// A mass [kg] with decimals to suit a tower of `total` [kg], of ten grams as of ten thousand tonnes.
+[[nodiscard]] std::string kilograms(double mass, double total);
+
+}  // namespace swaymark
