@@ -14,6 +14,6 @@ std::string percent(double ratio) { return figure(100.0 * ratio, 1); }
 
 std::string kilo(double value) { return figure(value / 1000.0, 2); }
 
-std::string kilograms(double mass, double total) {
-  return figure(mass, total < 100.0 ? 3 : 1);
+std::string kilograms(double mass, double total) { return figure(mass, total < 100.0 ? 3 : 1); }
+
 }  // namespace swaymark
