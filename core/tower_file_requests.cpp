@@ -13,12 +13,6 @@ namespace {
 constexpr int kMostModes = 100'000;
 constexpr int kMostHarmonics = 1000;
 
-std::vector<std::string> axis_names(const Tower& tower) {
-  std::vector<std::string> names;
-  for (const Axis axis : tower.axes()) names.emplace_back(name_of(axis));
-  return names;
-}
-
 BandDirection band_direction(MapView& band, const Tower& tower) {
   const YamlNode* node = band.find("direction");
   if (node == nullptr) return BandDirection::any;

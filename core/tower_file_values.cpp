@@ -140,6 +140,30 @@ std::optional<std::size_t> NameTable::find(const YamlNode& node, FaultList& faul
   return std::nullopt;
 }
 
+std::vector<std::size_t> read_node_list(const YamlNode& list, const NameTable& nodes, FaultList& faults) {
+  std::vector<std::size_t> result;
+  const auto* items = read_list(list, "nodes", "node names", faults);
+  if (items == nullptr) return result;
+  std::unordered_map<std::size_t, Place> seen;
+  for (const YamlNode& item : *items) {
+    const auto node = nodes.find(item, faults);
+    if (!node) continue;
+    const auto [first, fresh] = seen.emplace(*node, item.place);
+    if (fresh) {
+      result.push_back(*node);
+    } else {
+      faults.add(item.place, wording::name_twice("node", item.text, first->second));
+    }
+  }
+  return result;
+}
+
+std::vector<std::string> axis_names(const Tower& tower) {
+  std::vector<std::string> names;
+  for (const Axis axis : tower.axes()) names.emplace_back(name_of(axis));
+  return names;
+}
+
 MapView::MapView(const YamlNode& node, std::string owner, FaultList& faults)
     : node_(node), owner_(std::move(owner)), faults_(faults), is_map_(node.kind == YamlNode::Kind::map) {
   if (!is_map_) faults_.add(node.place, wording::wrong_kind(owner_, "a map of keys", node.description()));

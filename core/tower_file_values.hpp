@@ -9,6 +9,7 @@
 
 #include "core/error.hpp"
 #include "core/quantity.hpp"
+#include "core/tower.hpp"
 #include "core/wording.hpp"
 #include "core/yaml_document.hpp"
 
@@ -51,6 +52,13 @@ class NameTable {
   std::string kind_;
   std::unordered_map<std::string, Entry> entries_;
 };
+
+/// The nodes a list names, each once.
+[[nodiscard]] std::vector<std::size_t> read_node_list(const YamlNode& list, const NameTable& nodes,
+                                                      FaultList& faults);
+
+/// The names of the axes the tower has, for messages and choices.
+[[nodiscard]] std::vector<std::string> axis_names(const Tower& tower);
 
 /// A map of the file as a set of keys. Every key asked for becomes a known one; `refuse_unknown` reports the
 /// rest.

@@ -80,7 +80,7 @@ Message keys_exclude(std::string_view key, std::string_view other, std::string_v
   return {fmt::format("'{}' and '{}' exclude each other in {}", key, other, owner), "keep one of them"};
 }
 Message one_key_of(std::string_view keys, std::string_view owner) {
-  return {fmt::format("{} needs one of {}", owner, keys), "add the one that applies"};
+  return {fmt::format("{} needs exactly one of {}", owner, keys), "give the one that applies"};
 }
 Message not_yet_supported(std::string_view what) {
   return {fmt::format("{} not yet supported", what), "remove it for now; it is never ignored"};
@@ -141,7 +141,7 @@ Message not_a_fraction(std::string_view key, std::string_view text, double value
 }
 Message not_a_whole_number(std::string_view key, std::string_view text, long limit) {
   return {fmt::format("'{}' wants a whole number from 1 to {}, got '{}'", key, limit, excerpt(text)),
-          "count modes and harmonics from 1"};
+          "write the number alone, without unit or fraction"};
 }
 Message too_far_away(std::string_view text) {
   return {fmt::format("the coordinate '{}' lies more than 1000 km away", excerpt(text)),
@@ -162,9 +162,8 @@ Message name_reserved(std::string_view kind, std::string_view name) {
   return {fmt::format("no {} may be called '{}'", kind, excerpt(name)),
           "the word has a meaning of its own; choose another"};
 }
-Message axis_unknown(std::string_view text, const std::vector<std::string>& axes) {
-  return {fmt::format("'{}' is no axis of this tower", excerpt(text)),
-          fmt::format("use {}", alternatives(axes))};
+Message axis_unknown(std::string_view came, const std::vector<std::string>& axes) {
+  return {fmt::format("{} is no axis of this tower", came), fmt::format("use {}", alternatives(axes))};
 }
 Message nothing_listed(std::string_view key, std::string_view wanted) {
   return {fmt::format("'{}' lists nothing", key), fmt::format("give {}, or remove the key", wanted)};

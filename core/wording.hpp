@@ -58,7 +58,7 @@ namespace swaymark::wording {
                                    const std::optional<std::string>& nearest);
 [[nodiscard]] Message name_twice(std::string_view kind, std::string_view name, Place first);
 [[nodiscard]] Message name_reserved(std::string_view kind, std::string_view name);
-[[nodiscard]] Message axis_unknown(std::string_view text, const std::vector<std::string>& axes);
+[[nodiscard]] Message axis_unknown(std::string_view came, const std::vector<std::string>& axes);
 [[nodiscard]] Message nothing_listed(std::string_view key, std::string_view wanted);
 
 // The structure.

@@ -1,0 +1,19 @@
+#pragma once
+
+#include "core/tower.hpp"
+#include "core/tower_file_values.hpp"
+
+/// The named parts of a tower file that members are made of: materials, sections, nodes. Private to the
+/// reader.
+namespace swaymark {
+
+struct PartNames {
+  NameTable materials{"material"};
+  NameTable sections{"section"};
+  NameTable nodes{"node"};
+};
+
+/// Reads the parts into the tower, whose dimensions are known by then.
+[[nodiscard]] PartNames read_parts(MapView& file, Tower& tower);
+
+}  // namespace swaymark
