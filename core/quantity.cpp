@@ -112,8 +112,9 @@ struct Parts {
 
 std::optional<Parts> split(std::string_view text) {
   std::string_view body = trimmed(text);
-  if (body.starts_with('+')) body.remove_prefix(1);
-  const std::string_view digits = body.starts_with('-') ? body.substr(1) : body;
+  const bool has_sign = body.starts_with('+') || body.starts_with('-');
+  const std::string_view digits = has_sign ? body.substr(1) : body;
+  if (body.starts_with('+')) body = digits;  // from_chars knows no plus sign
   // from_chars also reads "inf" and "nan", which no tower contains.
   const bool starts_like_number =
       !digits.empty() && (std::isdigit(static_cast<unsigned char>(digits[0])) != 0 || digits[0] == '.');

@@ -1,5 +1,6 @@
 #include "core/yaml_document.hpp"
 
+#include <algorithm>
 #include <istream>
 #include <streambuf>
 #include <unordered_map>
@@ -39,28 +40,34 @@ class TreeBuilder : public YAML::EventHandler {
   TreeBuilder(std::string file, const YamlLimits& limits) : file_(std::move(file)), limits_(limits) {}
 
   YamlNode take_root() { return std::move(root_); }
+  [[nodiscard]] Place start() const { return start_; }
 
-  void OnDocumentStart(const YAML::Mark& /*mark*/) override {}
+  void OnDocumentStart(const YAML::Mark& mark) override { start_ = place_of(mark); }
   void OnDocumentEnd() override {}
 
   void OnNull(const YAML::Mark& mark, YAML::anchor_t anchor) override {
-    add(make(YamlNode::Kind::null, mark), anchor);
+    add(make(YamlNode::Kind::null, mark), anchor, 1);
   }
   void OnScalar(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
                 const std::string& value) override {
     refuse_tag(mark, tag);
+    // A long text counts as several values: aliases of it cannot fill the memory within the limit.
+    constexpr std::size_t bytes_per_value = 32;
+    const std::size_t before = nodes_;
+    nodes_ += value.size() / bytes_per_value;
     YamlNode node = make(YamlNode::Kind::scalar, mark);
     node.text = value;
-    add(std::move(node), anchor);
+    add(std::move(node), anchor, nodes_ - before);
   }
   void OnAlias(const YAML::Mark& mark, YAML::anchor_t anchor) override {
     const auto found = anchors_.find(anchor);
     if (found == anchors_.end()) refuse(mark, wording::alias_to_itself());
     nodes_ += found->second.size;
     check_size(mark);
+    if (open_.size() + found->second.height > limits_.depth) refuse(mark, wording::too_deep(limits_.depth));
     YamlNode copy = found->second.node;
     copy.place = place_of(mark);
-    attach(std::move(copy));
+    attach(std::move(copy), found->second.height);
   }
   void OnSequenceStart(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
                        YAML::EmitterStyle::value /*style*/) override {
@@ -78,10 +85,12 @@ class TreeBuilder : public YAML::EventHandler {
     YamlNode node;
     YAML::anchor_t anchor = 0;
     std::size_t nodes_before = 0;
+    std::size_t height = 1;  // levels of nesting from here down
   };
   struct Anchored {
     YamlNode node;
     std::size_t size = 0;
+    std::size_t height = 0;
   };
 
   [[noreturn]] void refuse(const YAML::Mark& mark, Message message) const {
@@ -105,7 +114,7 @@ class TreeBuilder : public YAML::EventHandler {
     refuse_tag(mark, tag);
     if (open_.size() >= limits_.depth) refuse(mark, wording::too_deep(limits_.depth));
     const std::size_t before = nodes_;
-    open_.push_back({make(kind, mark), anchor, before});
+    open_.push_back({make(kind, mark), anchor, before, 1});
   }
   void close() {
     Open done = std::move(open_.back());
@@ -115,24 +124,26 @@ class TreeBuilder : public YAML::EventHandler {
       nodes_ += size;  // the copy kept for the aliases counts too
       if (nodes_ > limits_.nodes)
         throw InputError({{file_, done.node.place, wording::too_many_values(limits_.nodes)}});
-      anchors_[done.anchor] = {done.node, size};
+      anchors_[done.anchor] = {done.node, size, done.height};
     }
-    attach(std::move(done.node));
+    attach(std::move(done.node), done.height);
   }
-  void add(YamlNode node, YAML::anchor_t anchor) {
-    if (anchor != 0) anchors_[anchor] = {node, 1};
-    attach(std::move(node));
+  void add(YamlNode node, YAML::anchor_t anchor, std::size_t size) {
+    if (anchor != 0) anchors_[anchor] = {node, size, 0};
+    attach(std::move(node), 0);
   }
-  void attach(YamlNode node) {
+  void attach(YamlNode node, std::size_t height) {
     if (open_.empty()) {
       root_ = std::move(node);
     } else {
       open_.back().node.items.push_back(std::move(node));
+      open_.back().height = std::max(open_.back().height, height + 1);
     }
   }
 
   std::string file_;
   YamlLimits limits_;
+  Place start_;
   std::size_t nodes_ = 0;
   std::vector<Open> open_;
   std::unordered_map<YAML::anchor_t, Anchored> anchors_;
@@ -188,7 +199,7 @@ YamlNode parse_yaml(std::string_view text, const std::string& file, FaultList& f
     YAML::Parser parser(stream);
     if (!parser.HandleNextDocument(builder)) refuse({1, 1}, wording::empty_file());
     TreeBuilder next(file, limits);
-    if (parser.HandleNextDocument(next)) refuse({}, wording::several_documents());
+    if (parser.HandleNextDocument(next)) refuse(next.start(), wording::several_documents());
   } catch (const YAML::DeepRecursion& error) {
     refuse(place_of(error.mark), wording::too_deep(limits.depth));
   } catch (const YAML::Exception& error) {
