@@ -3,6 +3,7 @@
 #include <cmath>
 #include <memory>
 
+#include <locale.h>  // NOLINT: newlocale and uselocale are POSIX, not in <clocale>
 #include <udunits2.h>
 
 namespace swaymark::unit_library {
@@ -21,6 +22,23 @@ struct FreeConverter {
 using Unit = std::unique_ptr<ut_unit, FreeUnit>;
 using Converter = std::unique_ptr<cv_converter, FreeConverter>;
 
+// The library reads numbers by the decimal sign of the locale, those of its own database included. This holds
+// the calling thread, and no other, to the neutral one.
+class NeutralLocale {
+ public:
+  NeutralLocale() : neutral_(newlocale(LC_ALL_MASK, "C", nullptr)), before_(uselocale(neutral_)) {}
+  ~NeutralLocale() {
+    uselocale(before_);
+    freelocale(neutral_);
+  }
+  NeutralLocale(const NeutralLocale&) = delete;
+  NeutralLocale& operator=(const NeutralLocale&) = delete;
+
+ private:
+  locale_t neutral_;
+  locale_t before_;
+};
+
 ut_system* database() {
   static const std::unique_ptr<ut_system, FreeSystem> system = [] {
     ut_set_error_message_handler(ut_ignore);  // the library is silent; the outcome says what happened
@@ -34,6 +52,7 @@ Unit parsed(std::string_view text) { return Unit(ut_parse(database(), std::strin
 }  // namespace
 
 Factor factor_to(std::string_view unit, std::string_view si_unit) {
+  const NeutralLocale guard;
   if (database() == nullptr) return {Outcome::no_database, 0.0};
   const Unit from = parsed(unit);
   const Unit to = parsed(si_unit);
