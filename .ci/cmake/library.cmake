@@ -3,6 +3,8 @@
 function(swaymark_target_settings target)
   target_compile_features(${target} PUBLIC cxx_std_20)
   set_target_properties(${target} PROPERTIES CXX_EXTENSIONS OFF)
+  # Eigen then refuses to give its few parts under a stricter licence.
+  target_compile_definitions(${target} PRIVATE EIGEN_MPL2_ONLY)
   if(PROJECT_IS_TOP_LEVEL)
     target_compile_options(${target} PRIVATE -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wold-style-cast
                                              -Wnon-virtual-dtor -Woverloaded-virtual -Werror)
@@ -21,9 +23,6 @@ function(swaymark_library folder)
   set_target_properties(${target} PROPERTIES EXPORT_NAME ${folder})
   target_sources(${target} PUBLIC FILE_SET HEADERS BASE_DIRS ${PROJECT_SOURCE_DIR} FILES ${ARG_HEADERS})
   target_link_libraries(${target} PUBLIC ${ARG_LINKS})
-  # $<BUILD_INTERFACE> keeps private header-only helpers out of the installed package.
-  foreach(library IN LISTS ARG_PRIVATE_LINKS)
-    target_link_libraries(${target} PRIVATE $<BUILD_INTERFACE:${library}>)
-  endforeach()
+  target_link_libraries(${target} PRIVATE ${ARG_PRIVATE_LINKS})
   swaymark_target_settings(${target})
 endfunction()
