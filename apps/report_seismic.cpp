@@ -82,11 +82,12 @@ class SeismicSection {
   }
 
   // The places of the largest values, largest first, ties in the order of the file.
-  static std::vector<std::size_t> ranked(const std::vector<double>& values) {
+  static std::vector<std::size_t> ranked(std::vector<double> values) {
+    std::transform(values.begin(), values.end(), values.begin(), nine_digits);
     std::vector<std::size_t> order(values.size());
     std::iota(order.begin(), order.end(), std::size_t{0});
     std::stable_sort(order.begin(), order.end(),
-                     [&](std::size_t a, std::size_t b) { return values[a] > values[b] * (1.0 + 1e-9); });
+                     [&](std::size_t a, std::size_t b) { return values[a] > values[b]; });
     order.resize(std::min(order.size(), kMostListed));
     return order;
   }
