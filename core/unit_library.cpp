@@ -64,8 +64,8 @@ Factor factor_to(std::string_view unit, std::string_view si_unit) {
   const double two = cv_convert_double(converter.get(), 2.0);
   const double none = cv_convert_double(converter.get(), 0.0);
   if (!std::isfinite(one) || one <= 0.0) return {Outcome::not_proportional, 0.0};
-  if (std::abs(two - 2.0 * one) > 1e-12 * two) return {Outcome::other_dimension, 0.0};  // 1/s against s
-  if (none != 0.0) return {Outcome::not_proportional, 0.0};
+  if (two < one) return {Outcome::other_dimension, 0.0};  // reciprocal: 1/s against s
+  if (none != 0.0 || std::abs(two - 2.0 * one) > 1e-12 * two) return {Outcome::not_proportional, 0.0};
   return {Outcome::converted, one};
 }
 

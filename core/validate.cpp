@@ -4,8 +4,8 @@
 #include <array>
 #include <cmath>
 #include <map>
-#include <numeric>
 #include <utility>
+#include <vector>
 
 #include "core/text.hpp"
 #include "core/wording.hpp"
@@ -19,26 +19,43 @@ constexpr double kSamePlace = 1e-6;
 
 using Cell = std::array<long long, 3>;
 
-Cell cell_of(const Eigen::Vector3d& position) {
-  return {std::llround(position.x() / kSamePlace), std::llround(position.y() / kSamePlace),
-          std::llround(position.z() / kSamePlace)};
+// The cells that the surroundings of a position reach into: one, or up to eight at their borders.
+std::vector<Cell> cells_near(const Eigen::Vector3d& position) {
+  constexpr double width = 4.0 * kSamePlace;
+  const auto cell = [](double coordinate) { return static_cast<long long>(std::floor(coordinate / width)); };
+  std::vector<Cell> cells{Cell{}};
+  for (std::size_t axis = 0; axis < 3; ++axis) {
+    const double coordinate = position[static_cast<Eigen::Index>(axis)];
+    const long long low = cell(coordinate - kSamePlace);
+    const long long high = cell(coordinate + kSamePlace);
+    const std::size_t count = cells.size();
+    for (std::size_t i = 0; i < count; ++i) {
+      cells[i][axis] = low;
+      if (high == low) continue;
+      cells.push_back(cells[i]);
+      cells.back()[axis] = high;
+    }
+  }
+  return cells;
 }
 
 void find_coincident_nodes(const Tower& tower, FaultList& faults) {
-  std::vector<std::size_t> order(tower.nodes.size());
-  std::iota(order.begin(), order.end(), std::size_t{0});
-  const auto cell = [&](std::size_t node) { return cell_of(tower.nodes[node].position); };
-  std::stable_sort(order.begin(), order.end(),
-                   [&](std::size_t a, std::size_t b) { return cell(a) < cell(b); });
-  std::size_t first = 0;
-  for (std::size_t i = 1; i < order.size(); ++i) {
-    if (cell(order[i]) != cell(order[first])) {
-      first = i;
+  std::map<Cell, std::vector<std::size_t>> grid;  // each node in every cell it is near to
+  for (std::size_t i = 0; i < tower.nodes.size(); ++i) {
+    const Node& node = tower.nodes[i];
+    const auto cells = cells_near(node.position);
+    const Node* first = nullptr;
+    for (const Cell& cell : cells) {
+      for (const std::size_t other : grid[cell]) {
+        const bool same = (tower.nodes[other].position - node.position).norm() < kSamePlace;
+        if (same && first == nullptr) first = &tower.nodes[other];
+      }
+    }
+    if (first != nullptr) {
+      faults.add(node.place, wording::nodes_coincide(excerpt(node.name), excerpt(first->name)));
       continue;
     }
-    const Node& node = tower.nodes[order[i]];
-    faults.add(node.place,
-               wording::nodes_coincide(excerpt(node.name), excerpt(tower.nodes[order[first]].name)));
+    for (const Cell& cell : cells) grid[cell].push_back(i);
   }
 }
 

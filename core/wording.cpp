@@ -38,15 +38,18 @@ Message too_deep(std::size_t limit) {
           "no key of a tower file needs that; remove brackets"};
 }
 Message too_many_values(std::size_t limit) {
-  return {fmt::format("the file holds more than {} values, aliases counted as what they stand for", limit),
-          "write less, or use fewer aliases"};
+  return {fmt::format("the file holds more than {} values", limit), "give nodes and bars in fewer words"};
+}
+Message aliases_too_large(std::size_t limit) {
+  return {fmt::format("the aliases of the file stand for more than {} values", limit),
+          "use fewer aliases, or name smaller values by them"};
 }
 Message alias_to_itself() { return {"an alias stands inside the value it names", "write the value out"}; }
 Message tag_not_used(std::string_view tag) {
   return {fmt::format("the tag '{}' means nothing in a tower file", excerpt(tag)), "remove it"};
 }
 Message not_a_tower() {
-  return {"a tower file is a map of keys", "begin with 'swaymark: 1', then 'nodes:', 'members:' ..."};
+  return {"a tower file is a map of keys", "begin with 'swaymark: 1', then 'nodes:' and 'members:'"};
 }
 Message version_missing() {
   return {"the format version is missing", "write 'swaymark: 1' as the first line"};

@@ -18,6 +18,7 @@ namespace swaymark::wording {
 [[nodiscard]] Message not_yaml(std::string_view reason);
 [[nodiscard]] Message too_deep(std::size_t limit);
 [[nodiscard]] Message too_many_values(std::size_t limit);
+[[nodiscard]] Message aliases_too_large(std::size_t limit);
 [[nodiscard]] Message alias_to_itself();
 [[nodiscard]] Message tag_not_used(std::string_view tag);
 [[nodiscard]] Message not_a_tower();

@@ -19,10 +19,37 @@ namespace swaymark {
 
 namespace {
 
-Place place_of(const YAML::Mark& mark) {
-  if (mark.is_null()) return {};
-  return {static_cast<std::uint32_t>(mark.line + 1), static_cast<std::uint32_t>(mark.column + 1)};
-}
+// Turns the parser's marks, whose columns count bytes, into places, whose columns count characters. Marks
+// come nearly in order, so that it goes on from the one before.
+class PlaceFinder {
+ public:
+  explicit PlaceFinder(std::string_view text) : text_(text) {}
+
+  Place operator()(const YAML::Mark& mark) {
+    if (mark.is_null() || mark.line < 0 || mark.column < 0) return {};
+    if (mark.line < line_) *this = PlaceFinder(text_);
+    for (; line_ < mark.line; ++line_) {
+      const std::size_t end = text_.find('\n', begin_);
+      begin_ = end == std::string_view::npos ? text_.size() : end + 1;
+      byte_ = 0;
+      characters_ = 0;
+    }
+    if (mark.column < byte_) byte_ = characters_ = 0;
+    for (; byte_ < mark.column; ++byte_) {
+      const std::size_t at = begin_ + static_cast<std::size_t>(byte_);
+      const bool goes_on = at < text_.size() && (static_cast<unsigned char>(text_[at]) & 0xC0U) == 0x80U;
+      if (!goes_on) ++characters_;
+    }
+    return {static_cast<std::uint32_t>(line_ + 1), static_cast<std::uint32_t>(characters_ + 1)};
+  }
+
+ private:
+  std::string_view text_;
+  std::size_t begin_ = 0;  // of the line
+  int line_ = 0;
+  int byte_ = 0;
+  int characters_ = 0;
+};
 
 // A stream over the text itself, without a copy.
 class TextBuffer : public std::streambuf {
@@ -37,12 +64,13 @@ class TextBuffer : public std::streambuf {
 // nesting nor aliases of aliases cost more than the limit allows.
 class TreeBuilder : public YAML::EventHandler {
  public:
-  TreeBuilder(std::string file, const YamlLimits& limits) : file_(std::move(file)), limits_(limits) {}
+  TreeBuilder(std::string file, const YamlLimits& limits, PlaceFinder& place_of)
+      : file_(std::move(file)), limits_(limits), place_of_(place_of) {}
 
   YamlNode take_root() { return std::move(root_); }
   [[nodiscard]] Place start() const { return start_; }
 
-  void OnDocumentStart(const YAML::Mark& mark) override { start_ = place_of(mark); }
+  void OnDocumentStart(const YAML::Mark& mark) override { start_ = place_of_(mark); }
   void OnDocumentEnd() override {}
 
   void OnNull(const YAML::Mark& mark, YAML::anchor_t anchor) override {
@@ -62,11 +90,11 @@ class TreeBuilder : public YAML::EventHandler {
   void OnAlias(const YAML::Mark& mark, YAML::anchor_t anchor) override {
     const auto found = anchors_.find(anchor);
     if (found == anchors_.end()) refuse(mark, wording::alias_to_itself());
-    nodes_ += found->second.size;
-    check_size(mark);
+    aliased_ += found->second.size;
+    if (aliased_ > limits_.aliased) refuse(mark, wording::aliases_too_large(limits_.aliased));
     if (open_.size() + found->second.height > limits_.depth) refuse(mark, wording::too_deep(limits_.depth));
     YamlNode copy = found->second.node;
-    copy.place = place_of(mark);
+    copy.place = place_of_(mark);
     attach(std::move(copy), found->second.height);
   }
   void OnSequenceStart(const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor,
@@ -93,13 +121,13 @@ class TreeBuilder : public YAML::EventHandler {
     std::size_t height = 0;
   };
 
-  [[noreturn]] void refuse(const YAML::Mark& mark, Message message) const {
-    throw InputError({{file_, place_of(mark), std::move(message)}});
+  [[noreturn]] void refuse(const YAML::Mark& mark, Message message) {
+    throw InputError({{file_, place_of_(mark), std::move(message)}});
   }
-  void refuse_tag(const YAML::Mark& mark, const std::string& tag) const {
+  void refuse_tag(const YAML::Mark& mark, const std::string& tag) {
     if (!tag.empty() && tag != "?" && tag != "!") refuse(mark, wording::tag_not_used(tag));
   }
-  void check_size(const YAML::Mark& mark) const {
+  void check_size(const YAML::Mark& mark) {
     if (nodes_ > limits_.nodes) refuse(mark, wording::too_many_values(limits_.nodes));
   }
   YamlNode make(YamlNode::Kind kind, const YAML::Mark& mark) {
@@ -107,20 +135,20 @@ class TreeBuilder : public YAML::EventHandler {
     check_size(mark);
     YamlNode node;
     node.kind = kind;
-    node.place = place_of(mark);
+    node.place = place_of_(mark);
     return node;
   }
   void open(YamlNode::Kind kind, const YAML::Mark& mark, const std::string& tag, YAML::anchor_t anchor) {
     refuse_tag(mark, tag);
     if (open_.size() >= limits_.depth) refuse(mark, wording::too_deep(limits_.depth));
-    const std::size_t before = nodes_;
+    const std::size_t before = nodes_ + aliased_;
     open_.push_back({make(kind, mark), anchor, before, 1});
   }
   void close() {
     Open done = std::move(open_.back());
     open_.pop_back();
     if (done.anchor != 0) {
-      const std::size_t size = nodes_ - done.nodes_before;
+      const std::size_t size = nodes_ + aliased_ - done.nodes_before;
       nodes_ += size;  // the copy kept for the aliases counts too
       if (nodes_ > limits_.nodes)
         throw InputError({{file_, done.node.place, wording::too_many_values(limits_.nodes)}});
@@ -143,8 +171,10 @@ class TreeBuilder : public YAML::EventHandler {
 
   std::string file_;
   YamlLimits limits_;
+  PlaceFinder& place_of_;
   Place start_;
   std::size_t nodes_ = 0;
+  std::size_t aliased_ = 0;
   std::vector<Open> open_;
   std::unordered_map<YAML::anchor_t, Anchored> anchors_;
   YamlNode root_;
@@ -194,11 +224,12 @@ YamlNode parse_yaml(std::string_view text, const std::string& file, FaultList& f
 
   TextBuffer buffer(text);
   std::istream stream(&buffer);
-  TreeBuilder builder(file, limits);
+  PlaceFinder place_of(text);
+  TreeBuilder builder(file, limits, place_of);
   try {
     YAML::Parser parser(stream);
     if (!parser.HandleNextDocument(builder)) refuse({1, 1}, wording::empty_file());
-    TreeBuilder next(file, limits);
+    TreeBuilder next(file, limits, place_of);
     if (parser.HandleNextDocument(next)) refuse(next.start(), wording::several_documents());
   } catch (const YAML::DeepRecursion& error) {
     refuse(place_of(error.mark), wording::too_deep(limits.depth));

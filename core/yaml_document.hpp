@@ -24,7 +24,8 @@ struct YamlNode {
 /// Limits that keep a hostile file from costing time or memory; far above any tower.
 struct YamlLimits {
   std::size_t bytes = std::size_t{64} << 20U;
-  std::size_t nodes = 3'000'000;  ///< aliases counted as what they stand for
+  std::size_t nodes = 3'000'000;  ///< values written out
+  std::size_t aliased = 100'000;  ///< values that all aliases together stand for
   std::size_t depth = 24;
 };
 

@@ -1,0 +1,58 @@
+#include "core/error.hpp"
+
+#include <catch2/catch.hpp>
+
+namespace swaymark::test {
+
+TEST_CASE("a fault reads as file then line then column then what and cure") {
+  const Fault fault{"tower.yaml", {12, 9}, {"nodes '1' and '2' stand at the same place", "keep one"}};
+  CHECK(to_string(fault) == "tower.yaml:12:9: nodes '1' and '2' stand at the same place; keep one");
+}
+
+TEST_CASE("a fault without a place names the file alone") {
+  CHECK(to_string({"tower.yaml", {}, {"the file is empty", "begin"}}) ==
+        "tower.yaml: the file is empty; begin");
+}
+
+TEST_CASE("a fault without a cure ends after what is wrong") {
+  CHECK(to_string({"a.yaml", {1, 2}, {"wrong", ""}}) == "a.yaml:1:2: wrong");
+}
+
+TEST_CASE("a refused input shows every fault on a line of its own") {
+  const InputError error({{"a.yaml", {1, 1}, {"one", "x"}}, {"a.yaml", {2, 1}, {"two", "y"}}});
+  CHECK(error.faults().size() == 2);
+  CHECK(std::string(error.what()) == "a.yaml:1:1: one; x\na.yaml:2:1: two; y");
+}
+
+TEST_CASE("a computation that cannot be done says what and what would cure it") {
+  const ComputationError error({"no modes were found", "fix fewer nodes"});
+  CHECK(std::string(error.what()) == "no modes were found; fix fewer nodes");
+  CHECK(error.message().what == "no modes were found");
+  CHECK(error.message().cure == "fix fewer nodes");
+}
+
+TEST_CASE("collected faults come out in the order of the file") {
+  FaultList faults("a.yaml");
+  faults.add({3, 1}, {"third", ""});
+  faults.add({1, 7}, {"second", ""});
+  faults.add({1, 2}, {"first", ""});
+  faults.add({3, 1}, {"fourth", ""});  // the same place: as it was added
+  REQUIRE(faults.size() == 4);
+  try {
+    faults.throw_if_any();
+    FAIL("nothing was thrown");
+  } catch (const InputError& error) {
+    std::string order;
+    for (const Fault& fault : error.faults()) order += fault.message.what + ' ';
+    CHECK(order == "first second third fourth ");
+    CHECK(error.faults().front().file == "a.yaml");
+  }
+}
+
+TEST_CASE("no faults let the reading go on") {
+  FaultList faults("a.yaml");
+  CHECK(faults.empty());
+  CHECK_NOTHROW(faults.throw_if_any());
+}
+
+}  // namespace swaymark::test
