@@ -6,6 +6,7 @@
 #include <exception>
 #include <new>
 #include <string_view>
+#include <utility>
 
 #include <fmt/format.h>
 #include <unistd.h>
@@ -61,10 +62,16 @@ void write_results(const Command& command, const Analysis& analysis) {
   }
 }
 
+// A file that the tower file names; "-" is a file of that name there, never standard input.
+std::string read_other_file(const std::string& path) {
+  return read_file(path == "-" ? "./-" : path, kMostBytes);
+}
+
 int run_command(const Command& command) {
   const std::string name = command.tower == "-" ? "standard input" : command.tower;
   const std::string bytes = read_file(command.tower, kMostBytes);
-  const Analysis analysis = analyse(read_tower(bytes, name), provenance_of(name, bytes), command.scope);
+  Tower tower = read_tower(bytes, name, read_other_file);
+  const Analysis analysis = analyse(std::move(tower), provenance_of(name, bytes), command.scope);
   if (analysis.mechanisms.any()) to_standard_error(mechanism_text(analysis));
   write_results(command, analysis);
   return status_of(analysis);

@@ -1,6 +1,7 @@
 #include "core/error.hpp"
 
 #include <algorithm>
+#include <iterator>
 #include <tuple>
 
 #include <fmt/format.h>
@@ -29,10 +30,17 @@ InputError::InputError(std::vector<Fault> faults) : faults_(std::move(faults)) {
 
 ComputationError::ComputationError(Message message) : message_(std::move(message)), text_(joined(message_)) {}
 
+void FaultList::take(FaultList other) {
+  std::move(other.faults_.begin(), other.faults_.end(), std::back_inserter(faults_));
+}
+
 void FaultList::throw_if_any() {
   if (faults_.empty()) return;
-  std::stable_sort(faults_.begin(), faults_.end(), [](const Fault& a, const Fault& b) {
-    return std::tie(a.place.line, a.place.column) < std::tie(b.place.line, b.place.column);
+  std::stable_sort(faults_.begin(), faults_.end(), [this](const Fault& a, const Fault& b) {
+    const bool a_elsewhere = a.file != file_;
+    const bool b_elsewhere = b.file != file_;
+    return std::tie(a_elsewhere, a.file, a.place.line, a.place.column) <
+           std::tie(b_elsewhere, b.file, b.place.line, b.place.column);
   });
   throw InputError(std::move(faults_));
 }

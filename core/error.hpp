@@ -60,9 +60,11 @@ class FaultList {
  public:
   explicit FaultList(std::string file) : file_(std::move(file)) {}
   void add(Place place, Message message) { faults_.push_back({file_, place, std::move(message)}); }
+  /// Those of another file that the file names.
+  void take(FaultList other);
   [[nodiscard]] bool empty() const { return faults_.empty(); }
   [[nodiscard]] std::size_t size() const { return faults_.size(); }
-  /// \throws InputError with the faults sorted by place, if there are any.
+  /// \throws InputError with the faults sorted by place, if there are any; those of other files come last.
   void throw_if_any();
 
  private:

@@ -30,6 +30,8 @@ struct Section {
   std::string name;
   double area = 0.0;                 ///< [m2] > 0
   std::optional<double> radius;      ///< smallest radius of gyration [m]
+  std::optional<double> perimeter;   ///< of the outline [m], what paint and ice cover
+  std::string size;                  ///< as the tables write it, `L 80x80x8`; empty where not given by size
   std::optional<std::string> curve;  ///< buckling curve a0, a, b, c, d (EN 1993-1-1)
   Place place;
 };

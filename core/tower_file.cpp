@@ -77,7 +77,7 @@ void refuse_later_keys(MapView& file) {
 
 }  // namespace
 
-Tower read_tower(std::string_view text, const std::string& name) {
+Tower read_tower(std::string_view text, const std::string& name, const FileSource& source) {
   FaultList faults(name);
   const YamlNode root = parse_yaml(text, name, faults);
   Tower tower;
@@ -89,7 +89,7 @@ Tower read_tower(std::string_view text, const std::string& name) {
   refuse_later_keys(file);
   const bool nodes_elsewhere = file.has("lattice") || file.has("nodes_from") || file.has("segments_from");
   if (!nodes_elsewhere) static_cast<void>(file.require("nodes", "nodes: {1: [0, 0, 0], 2: [0, 0, 3 m]}"));
-  const PartNames parts = read_parts(file, tower);
+  const PartNames parts = read_parts(file, tower, source);
   const NameTable groups = read_members(file, parts, tower);
   read_supports(file, parts.nodes, tower);
   read_masses(file, parts.nodes, groups, tower);

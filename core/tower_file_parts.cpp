@@ -1,11 +1,11 @@
 #include "core/tower_file_parts.hpp"
 
 #include <cmath>
-#include <numbers>
 
 #include <fmt/format.h>
 
 #include "core/text.hpp"
+#include "core/tower_file_sections.hpp"
 
 namespace swaymark {
 
@@ -38,51 +38,6 @@ Material read_material(const std::string& name, const YamlNode& at, const YamlNo
   material.yield = view.value("yield", Quantity::stress, Range::positive);
   view.refuse_unknown();
   return material;
-}
-
-void read_tube(const YamlNode& value, Section& section, FaultList& faults) {
-  if (value.kind != YamlNode::Kind::sequence || value.items.size() != 2) {
-    faults.add(value.place,
-               wording::wrong_kind("tube", "[outside diameter, wall thickness]", value.description()));
-    return;
-  }
-  const auto diameter = read_value(value.items[0], "diameter", Quantity::length, Range::positive, faults);
-  const auto wall = read_value(value.items[1], "wall", Quantity::length, Range::positive, faults);
-  if (!diameter || !wall) return;
-  if (2.0 * *wall > *diameter) {
-    faults.add(value.place, wording::tube_wall(*diameter, *wall));
-    return;
-  }
-  const double inside = *diameter - 2.0 * *wall;
-  section.area = std::numbers::pi * *wall * (*diameter - *wall);
-  section.radius = 0.25 * std::hypot(*diameter, inside);
-}
-
-Section read_section(const std::string& name, const YamlNode& at, const YamlNode& value, FaultList& faults) {
-  MapView view(value, fmt::format("section '{}'", excerpt(name)), faults);
-  Section section;
-  section.name = name;
-  section.place = at.place;
-  const bool by_area = view.has("area");
-  const bool by_tube = view.has("tube");
-  view.refuse_later("size", "sections by size are");
-  view.refuse_later("double", "double sections are");
-  if (by_area && by_tube) faults.add(at.place, wording::keys_exclude("area", "tube", view.owner()));
-  section.area = view.value("area", Quantity::area, Range::positive).value_or(1.0);
-  section.radius = view.value("radius", Quantity::length, Range::positive);
-  if (const YamlNode* curve = view.find("curve")) {
-    const std::vector<std::string> curves{"a0", "a", "b", "c", "d"};
-    if (const auto choice = read_choice(*curve, "curve", curves, faults)) section.curve = curves[*choice];
-  }
-  if (const YamlNode* tube = view.find("tube")) {
-    if (view.has("radius")) faults.add(at.place, wording::keys_exclude("radius", "tube", view.owner()));
-    read_tube(*tube, section, faults);
-  }
-  if (view.is_map() && !by_area && !by_tube && !view.has("size")) {
-    faults.add(at.place, wording::one_key_of("'area' or 'tube'", view.owner()));
-  }
-  view.refuse_unknown();
-  return section;
 }
 
 // Nothing unless every coordinate could be read.
@@ -120,16 +75,17 @@ Eigen::Vector3d out_of_the_way(std::size_t index) {
 
 }  // namespace
 
-PartNames read_parts(MapView& file, Tower& tower) {
+PartNames read_parts(MapView& file, Tower& tower, const FileSource& source) {
   PartNames names;
   FaultList& faults = file.faults();
   read_named(file, "materials", names.materials, [&](const auto& name, const auto& at, const auto& value) {
     names.materials.add(name, tower.materials.size(), at.place);
     tower.materials.push_back(read_material(name, at, value, faults));
   });
+  const SectionTable sizes = read_section_sizes(file, tower.file, source);
   read_named(file, "sections", names.sections, [&](const auto& name, const auto& at, const auto& value) {
     names.sections.add(name, tower.sections.size(), at.place);
-    tower.sections.push_back(read_section(name, at, value, faults));
+    tower.sections.push_back(read_section(name, at, value, sizes, faults));
   });
   read_named(file, "nodes", names.nodes, [&](const auto& name, const auto& at, const auto& value) {
     const std::size_t index = tower.nodes.size();

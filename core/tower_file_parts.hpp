@@ -1,5 +1,6 @@
 #pragma once
 
+#include "core/file_source.hpp"
 #include "core/tower.hpp"
 #include "core/tower_file_values.hpp"
 
@@ -13,7 +14,7 @@ struct PartNames {
   NameTable nodes{"node"};
 };
 
-/// Reads the parts into the tower, whose dimensions are known by then.
-[[nodiscard]] PartNames read_parts(MapView& file, Tower& tower);
+/// Reads the parts into the tower, whose file and dimensions are known by then.
+[[nodiscard]] PartNames read_parts(MapView& file, Tower& tower, const FileSource& source);
 
 }  // namespace swaymark

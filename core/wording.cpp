@@ -205,6 +205,70 @@ Message tube_wall(double diameter, double wall) {
           "give [outside diameter, wall thickness]; the wall is at most half of the diameter"};
 }
 
+Message size_not_read(std::string_view size) {
+  return {fmt::format("'{}' is no size of a section", excerpt(size)),
+          "write family and millimetres, such as 'L 80x80x8', 'CHS 168.3x6.3' or 'SHS 100x100x5'"};
+}
+Message size_unknown(std::string_view size, const std::vector<std::string>& nearest) {
+  return {fmt::format("there is no size '{}' in the tables", excerpt(size)),
+          fmt::format("nearest: {}; a size of your own goes into the table of 'sections_from'",
+                      alternatives(nearest))};
+}
+Message size_family_unknown(std::string_view family, const std::vector<std::string>& families) {
+  return {
+      fmt::format("there is no family '{}' of sections in the tables", excerpt(family)),
+      fmt::format("known: {}; a size of your own goes into the table of 'sections_from'", listed(families))};
+}
+Message size_listed_already(std::string_view size) {
+  return {fmt::format("the size '{}' is in the tables already", excerpt(size)),
+          "remove the row, or give it a name of its own"};
+}
+Message radius_beside_size(std::string_view owner) {
+  return {fmt::format("'radius' stands beside 'size' in {}, which brings its own", owner),
+          "remove 'radius', or give 'area' and 'radius' in place of 'size'"};
+}
+Message double_needs_angle() {
+  return {"'double' is known for equal angles by size only",
+          "write for example '{size: L 80x80x8, double: true, gap: 10 mm}', or give 'area' and 'radius'"};
+}
+Message gap_needs_double() {
+  return {"'gap' is the gap of a pair, and this section is single", "add 'double: true' or remove 'gap'"};
+}
+
+Message no_other_files(std::string_view name) {
+  return {
+      fmt::format("the file '{}' is out of reach here: only the tower file itself was given", excerpt(name)),
+      "write its content into the tower file"};
+}
+Message csv_too_long(std::size_t bytes, std::size_t limit) {
+  return {fmt::format("the table has {} bytes, more than the {} that it may have", bytes, limit),
+          "leave out what the tower does not need"};
+}
+Message csv_empty() {
+  return {"the table is empty", "begin with a line that names the columns, units in brackets"};
+}
+Message csv_quote() {
+  return {"a quoted cell does not end, or goes on after its closing quote",
+          "close the quotes in the same line, and write a quote inside them twice"};
+}
+Message csv_separator() {
+  return {"the columns are not separated by commas",
+          "save the table with commas between the cells and points as decimal signs"};
+}
+Message csv_cells(std::size_t came, std::size_t columns) {
+  return {fmt::format("the row has {} cell{}, the first line names {} column{}", came, came == 1 ? "" : "s",
+                      columns, columns == 1 ? "" : "s"),
+          "separate cells by commas, write decimals with a point, and quote a cell that holds a comma"};
+}
+Message csv_not_a_number(std::string_view column, std::string_view text, std::string_view unit) {
+  return {fmt::format("'{}' wants a plain number, got '{}'", excerpt(column), excerpt(text)),
+          fmt::format("the unit [{}] stands in the first line already", excerpt(unit))};
+}
+Message csv_word_without_unit(std::string_view column) {
+  return {fmt::format("the column '{}' holds words, which have no unit", excerpt(column)),
+          fmt::format("write '{}' alone", excerpt(column))};
+}
+
 Message band_reversed(double from, double to) {
   return {fmt::format("the band ends at {:.6g} Hz, not above its begin at {:.6g} Hz", to, from),
           "exchange 'from' and 'to'"};

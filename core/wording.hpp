@@ -75,6 +75,25 @@ namespace swaymark::wording {
 [[nodiscard]] Message holds_nothing();
 [[nodiscard]] Message tube_wall(double diameter, double wall);
 
+// Sizes of sections.
+[[nodiscard]] Message size_not_read(std::string_view size);
+[[nodiscard]] Message size_unknown(std::string_view size, const std::vector<std::string>& nearest);
+[[nodiscard]] Message size_family_unknown(std::string_view family, const std::vector<std::string>& families);
+[[nodiscard]] Message size_listed_already(std::string_view size);
+[[nodiscard]] Message radius_beside_size(std::string_view owner);
+[[nodiscard]] Message double_needs_angle();
+[[nodiscard]] Message gap_needs_double();
+
+// Other files, and tables in CSV.
+[[nodiscard]] Message no_other_files(std::string_view name);
+[[nodiscard]] Message csv_too_long(std::size_t bytes, std::size_t limit);
+[[nodiscard]] Message csv_empty();
+[[nodiscard]] Message csv_quote();
+[[nodiscard]] Message csv_separator();
+[[nodiscard]] Message csv_cells(std::size_t came, std::size_t columns);
+[[nodiscard]] Message csv_not_a_number(std::string_view column, std::string_view text, std::string_view unit);
+[[nodiscard]] Message csv_word_without_unit(std::string_view column);
+
 // Requests.
 [[nodiscard]] Message band_reversed(double from, double to);
 [[nodiscard]] Message points_need_two();
