@@ -28,9 +28,8 @@ std::vector<BarElement> bar_elements(const Tower& tower) {
   std::vector<BarElement> elements;
   elements.reserve(tower.bars.size());
   for (const Bar& bar : tower.bars) {
-    const Group& group = tower.groups[bar.group];
-    const Material& material = tower.materials[group.material];
-    const double area = tower.sections[group.section].area;
+    const Material& material = tower.material_of(bar);
+    const double area = tower.section_of(bar).area;
     const Eigen::Vector3d span = tower.nodes[bar.to].position - tower.nodes[bar.from].position;
     BarElement element;
     element.from = bar.from;

@@ -8,6 +8,14 @@ std::string Tower::bar_name(std::size_t bar) const {
   return fmt::format("{}-{}", groups[bars[bar].group].name, bars[bar].number);
 }
 
+const Section& Tower::section_of(const Bar& bar) const {
+  return sections[bar.section.value_or(groups[bar.group].section)];
+}
+
+const Material& Tower::material_of(const Bar& bar) const {
+  return materials[bar.material.value_or(groups[bar.group].material)];
+}
+
 double Tower::extent() const {
   if (nodes.empty()) return 0.0;
   Eigen::Vector3d low = nodes.front().position;

@@ -42,7 +42,7 @@ struct Node {
   Place place;
 };
 
-/// Bars that share a section and a material.
+/// Bars of one name that share a section and a material, unless a bar has its own.
 struct Group {
   std::string name;
   std::size_t section = 0;
@@ -56,6 +56,8 @@ struct Bar {
   std::size_t to = 0;
   std::size_t number = 0;  ///< within its group, from 1
   Place place;
+  std::optional<std::size_t> section = {};   ///< its own, where it differs from the group's
+  std::optional<std::size_t> material = {};  ///< likewise
 };
 
 /// What holds one node: an axis is fixed, on a spring to the ground, or free.
@@ -90,6 +92,15 @@ struct Allowance {
   Place place;
 };
 
+/// Nodes that the pattern of a lattice leaves loose, whatever else is written by hand, and what would hold
+/// them.
+struct LooseNodes {
+  std::string what;                ///< a sentence without a full stop
+  std::vector<std::size_t> nodes;  ///< that can move
+  std::size_t motions = 0;         ///< independent ones, with the base held
+  std::vector<std::string> cures;
+};
+
 enum class MassScheme { consistent, lumped, averaged };
 
 struct Tower {
@@ -106,6 +117,7 @@ struct Tower {
   std::vector<NodeMass> node_masses;
   std::vector<LineMass> line_masses;
   std::vector<Allowance> allowances;
+  std::vector<LooseNodes> lattice_leaves_loose;  ///< of a tower written by panels
 
   MassScheme mass_scheme = MassScheme::consistent;
   std::vector<double>
@@ -119,6 +131,8 @@ struct Tower {
   [[nodiscard]] std::vector<Axis> axes() const { return axes_of(dimensions); }
   /// `legs-3`
   [[nodiscard]] std::string bar_name(std::size_t bar) const;
+  [[nodiscard]] const Section& section_of(const Bar& bar) const;
+  [[nodiscard]] const Material& material_of(const Bar& bar) const;
   /// The tower's extent [m]: the diagonal of the box around its nodes.
   [[nodiscard]] double extent() const;
 };

@@ -1,5 +1,6 @@
 #include "core/tower_file.hpp"
 
+#include "core/tower_file_lattice.hpp"
 #include "core/tower_file_masses.hpp"
 #include "core/tower_file_members.hpp"
 #include "core/tower_file_parts.hpp"
@@ -62,7 +63,6 @@ void read_stiffening(MapView& file) {
 }
 
 void refuse_later_keys(MapView& file) {
-  file.refuse_later("lattice", "towers written by panels are");
   file.refuse_later("nodes_from", "nodes from a CSV file are");
   file.refuse_later("bars_from", "bars from a CSV file are");
   file.refuse_later("segments_from", "bars from line segments are");
@@ -89,8 +89,10 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   refuse_later_keys(file);
   const bool nodes_elsewhere = file.has("lattice") || file.has("nodes_from") || file.has("segments_from");
   if (!nodes_elsewhere) static_cast<void>(file.require("nodes", "nodes: {1: [0, 0, 0], 2: [0, 0, 3 m]}"));
-  const PartNames parts = read_parts(file, tower, source);
-  const NameTable groups = read_members(file, parts, tower);
+  PartNames parts = read_parts(file, tower, source);
+  NameTable groups("group");
+  read_lattice(file, parts, groups, tower);
+  read_members(file, parts, groups, tower);
   read_supports(file, parts.nodes, tower);
   read_masses(file, parts.nodes, groups, tower);
   read_mass_matrix(file, tower);

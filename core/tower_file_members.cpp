@@ -1,5 +1,7 @@
 #include "core/tower_file_members.hpp"
 
+#include <algorithm>
+
 namespace swaymark {
 
 namespace {
@@ -20,26 +22,31 @@ void read_bars(const YamlNode& list, const NameTable& nodes, Tower& tower, Fault
   }
 }
 
-void read_group_name(const YamlNode& node, Group& group, std::size_t index, NameTable& groups,
-                     FaultList& faults) {
+// \param generated  how many groups the lattice made: the tower's first.
+void read_group_name(const YamlNode& node, Group& group, std::size_t generated, const Tower& tower,
+                     NameTable& groups, FaultList& faults) {
   const auto name = read_word(node, "group", faults);
   if (!name) return;
   group.name = *name;
   if (group.name == "all") faults.add(node.place, wording::name_reserved("group", group.name));
   if (const auto first = groups.place_of(group.name)) {
-    faults.add(node.place, wording::name_twice("group", group.name, *first));
+    const auto end = tower.groups.begin() + static_cast<std::ptrdiff_t>(generated);
+    const bool taken =
+        std::any_of(tower.groups.begin(), end, [&](const Group& known) { return known.name == group.name; });
+    faults.add(node.place, taken ? wording::name_generated("group", group.name, *first)
+                                 : wording::name_twice("group", group.name, *first));
   }
-  groups.add(group.name, index, node.place);
+  groups.add(group.name, tower.groups.size(), node.place);
 }
 
-void read_group(const YamlNode& item, const PartNames& parts, Tower& tower, NameTable& groups,
-                FaultList& faults) {
+void read_group(const YamlNode& item, const PartNames& parts, std::size_t generated, Tower& tower,
+                NameTable& groups, FaultList& faults) {
   MapView view(item, "a group of members", faults);
   if (!view.is_map()) return;
   Group group;
   group.place = item.place;
   if (const YamlNode* name = view.require("group", "group: legs")) {
-    read_group_name(*name, group, tower.groups.size(), groups, faults);
+    read_group_name(*name, group, generated, tower, groups, faults);
   }
   if (const YamlNode* section = view.require("section", "section: leg")) {
     group.section = parts.sections.find(*section, faults).value_or(0);
@@ -56,15 +63,14 @@ void read_group(const YamlNode& item, const PartNames& parts, Tower& tower, Name
 
 }  // namespace
 
-NameTable read_members(MapView& file, const PartNames& parts, Tower& tower) {
-  NameTable groups("group");
-  const YamlNode* members =
-      file.require("members", "members: [{group: legs, section: leg, material: steel, bars: [[1, 2]]}]");
-  if (members == nullptr) return groups;
+void read_members(MapView& file, const PartNames& parts, NameTable& groups, Tower& tower) {
+  const std::string_view example = "members: [{group: legs, section: leg, material: steel, bars: [[1, 2]]}]";
+  const YamlNode* members = file.has("lattice") ? file.find("members") : file.require("members", example);
+  if (members == nullptr) return;
   const auto* items = read_list(*members, "members", "groups of bars", file.faults());
-  if (items == nullptr) return groups;
-  for (const YamlNode& item : *items) read_group(item, parts, tower, groups, file.faults());
-  return groups;
+  if (items == nullptr) return;
+  const std::size_t generated = tower.groups.size();
+  for (const YamlNode& item : *items) read_group(item, parts, generated, tower, groups, file.faults());
 }
 
 }  // namespace swaymark

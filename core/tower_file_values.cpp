@@ -117,6 +117,10 @@ void NameTable::add(const std::string& name, std::size_t index, Place place) {
   entries_.emplace(name, Entry{index, place});
 }
 
+void NameTable::add_several(const std::string& name, std::vector<std::size_t> indices) {
+  several_.emplace(name, std::move(indices));
+}
+
 std::optional<Place> NameTable::place_of(const std::string& name) const {
   const auto found = entries_.find(name);
   if (found == entries_.end()) return std::nullopt;
@@ -128,6 +132,12 @@ std::optional<std::size_t> NameTable::find(const YamlNode& node, FaultList& faul
   if (name == nullptr) return std::nullopt;
   const auto found = entries_.find(*name);
   if (found != entries_.end()) return found->second.index;
+  const auto several = several_.find(*name);
+  if (several != several_.end()) {
+    faults.add(node.place, wording::name_means_several(kind_, *name, several->second.size()));
+    return std::nullopt;
+  }
+  if (open_) return std::nullopt;
   std::optional<std::string> close;
   constexpr std::size_t most_compared = 2000;  // past that a suggestion costs more than it helps
   if (entries_.size() <= most_compared && faults.size() < 100) {
@@ -140,19 +150,30 @@ std::optional<std::size_t> NameTable::find(const YamlNode& node, FaultList& faul
   return std::nullopt;
 }
 
+std::vector<std::size_t> NameTable::find_all(const YamlNode& node, FaultList& faults) const {
+  if (node.kind == YamlNode::Kind::scalar) {
+    const auto several = several_.find(node.text);
+    if (several != several_.end()) return several->second;
+  }
+  const auto one = find(node, faults);
+  return one ? std::vector<std::size_t>{*one} : std::vector<std::size_t>{};
+}
+
 std::vector<std::size_t> read_node_list(const YamlNode& list, const NameTable& nodes, FaultList& faults) {
+  if (list.kind == YamlNode::Kind::scalar) return nodes.find_all(list, faults);
   std::vector<std::size_t> result;
   const auto* items = read_list(list, "nodes", "node names", faults);
   if (items == nullptr) return result;
   std::unordered_map<std::size_t, Place> seen;
   for (const YamlNode& item : *items) {
-    const auto node = nodes.find(item, faults);
-    if (!node) continue;
-    const auto [first, fresh] = seen.emplace(*node, item.place);
-    if (fresh) {
-      result.push_back(*node);
-    } else {
-      faults.add(item.place, wording::name_twice("node", item.text, first->second));
+    for (const std::size_t node : nodes.find_all(item, faults)) {
+      const auto [first, fresh] = seen.emplace(node, item.place);
+      if (fresh) {
+        result.push_back(node);
+      } else {
+        faults.add(item.place, wording::name_twice("node", item.text, first->second));
+        break;
+      }
     }
   }
   return result;
@@ -166,7 +187,7 @@ std::vector<std::string> axis_names(const Tower& tower) {
 
 MapView::MapView(const YamlNode& node, std::string owner, FaultList& faults)
     : node_(node), owner_(std::move(owner)), faults_(faults), is_map_(node.kind == YamlNode::Kind::map) {
-  if (!is_map_) faults_.add(node.place, wording::wrong_kind(owner_, "a map of keys", node.description()));
+  if (!is_map_) faults_.add(node.place, wording::wants_map(owner_, node.description()));
 }
 
 const YamlNode* MapView::entry(std::string_view key) const {

@@ -40,9 +40,16 @@ class NameTable {
  public:
   explicit NameTable(std::string kind) : kind_(std::move(kind)) {}
   void add(const std::string& name, std::size_t index, Place place);
+  /// A name for several things that have names of their own: `top`.
+  void add_several(const std::string& name, std::vector<std::size_t> indices);
+  /// Names are missing that could not be read; an unknown one may be one of them, and is no fault.
+  void leave_open() { open_ = true; }
+  [[nodiscard]] bool means_several(const std::string& name) const { return several_.contains(name); }
   [[nodiscard]] std::optional<Place> place_of(const std::string& name) const;
   /// The index of the name that stands at `node`, or a fault that names the nearest one known.
   [[nodiscard]] std::optional<std::size_t> find(const YamlNode& node, FaultList& faults) const;
+  /// As find, for names that may stand for several.
+  [[nodiscard]] std::vector<std::size_t> find_all(const YamlNode& node, FaultList& faults) const;
 
  private:
   struct Entry {
@@ -51,9 +58,11 @@ class NameTable {
   };
   std::string kind_;
   std::unordered_map<std::string, Entry> entries_;
+  std::unordered_map<std::string, std::vector<std::size_t>> several_;
+  bool open_ = false;
 };
 
-/// The nodes a list names, each once.
+/// The nodes a list names, or one name in its place, each once.
 [[nodiscard]] std::vector<std::size_t> read_node_list(const YamlNode& list, const NameTable& nodes,
                                                       FaultList& faults);
 

@@ -92,6 +92,10 @@ Message not_yet_supported(std::string_view what) {
 Message wrong_kind(std::string_view key, std::string_view wanted, std::string_view came) {
   return {fmt::format("'{}' wants {}, got {}", excerpt(key), wanted, came), fmt::format("give {}", wanted)};
 }
+Message wants_map(std::string_view owner, std::string_view came) {
+  return {fmt::format("{} wants a map of keys, got {}", owner, came),
+          "write {key: value, ...} or one key a line"};
+}
 Message not_a_choice(std::string_view key, std::string_view came, const std::vector<std::string>& choices) {
   const auto close = nearest(came, choices);
   return {fmt::format("'{}' cannot be '{}'", key, excerpt(came)),
@@ -164,6 +168,15 @@ Message name_twice(std::string_view kind, std::string_view name, Place first) {
 Message name_reserved(std::string_view kind, std::string_view name) {
   return {fmt::format("no {} may be called '{}'", kind, excerpt(name)),
           "the word has a meaning of its own; choose another"};
+}
+Message name_means_several(std::string_view kind, std::string_view name, std::size_t count) {
+  return {fmt::format("one {} is wanted here, and '{}' names {}", kind, excerpt(name), count),
+          "name one of them"};
+}
+Message name_generated(std::string_view kind, std::string_view name, Place lattice) {
+  return {
+      fmt::format("the {} '{}' is made by the lattice in line {} already", kind, excerpt(name), lattice.line),
+      "choose another name"};
 }
 Message axis_unknown(std::string_view came, const std::vector<std::string>& axes) {
   return {fmt::format("{} is no axis of this tower", came), fmt::format("use {}", alternatives(axes))};
@@ -267,6 +280,49 @@ Message csv_not_a_number(std::string_view column, std::string_view text, std::st
 Message csv_word_without_unit(std::string_view column) {
   return {fmt::format("the column '{}' holds words, which have no unit", excerpt(column)),
           fmt::format("write '{}' alone", excerpt(column))};
+}
+
+Message lattice_needs_space(int dimensions) {
+  return {fmt::format("a lattice by panels stands in 3 dimensions, this tower in {}", dimensions),
+          "remove 'dimensions', or write the tower by nodes and members"};
+}
+Message lattice_without_material() {
+  return {"this panel has no material",
+          "add 'material: steel' to the lattice for all panels, or to the panel for itself"};
+}
+Message legs_meet(std::string_view text, double least) {
+  return {fmt::format("the legs meet: a width of '{}' is under {:.6g} m", excerpt(text), least),
+          "end the panels at a small width and join their top corners to a node under 'nodes' by bars under "
+          "'members'"};
+}
+Message panel_too_low(std::string_view text, double least) {
+  return {fmt::format("a panel of height '{}' is lower than {:.6g} m", excerpt(text), least),
+          "check the unit; bare numbers are metres"};
+}
+Message lattice_too_high(double height, double limit) {
+  return {fmt::format("the panels add up to {:.6g} m, more than {:.6g} m", height, limit),
+          "check heights, units and 'repeat'"};
+}
+Message lattice_too_many_nodes(double nodes, std::size_t limit) {
+  return {fmt::format("the lattice would have {:.0f} nodes, more than {}", nodes, limit),
+          "lower 'repeat', or use higher panels"};
+}
+Message k_without_horizontals() {
+  return {"K-bracing meets in the middle of the horizontals at the panel's top, and there are none",
+          "add 'horizontals: <section>' to the panel"};
+}
+Message k_down_without_horizontals(bool lowest) {
+  return {"bracing 'K down' meets in the middle of the horizontals at the panel's foot, and there are none",
+          lowest ? "add 'base_horizontals: <section>' to the lattice, or use 'bracing: K'"
+                 : "add 'horizontals: <section>' to the panel below"};
+}
+Message diamond_without_mid_nodes() {
+  return {"a diamond joins the middles of the horizontals, and no diagonals meet there",
+          "brace by K, or use 'pattern: diagonal' or 'pattern: crossed'"};
+}
+Message triangle_is_rigid_in_plan() {
+  return {"a triangle needs no diagonal in plan and has none",
+          "remove 'plan_bracing', or use 'pattern: diamond' with K-bracing"};
 }
 
 Message band_reversed(double from, double to) {

@@ -39,6 +39,7 @@ namespace swaymark::wording {
 
 // Values.
 [[nodiscard]] Message wrong_kind(std::string_view key, std::string_view wanted, std::string_view came);
+[[nodiscard]] Message wants_map(std::string_view owner, std::string_view came);
 [[nodiscard]] Message not_a_choice(std::string_view key, std::string_view came,
                                    const std::vector<std::string>& choices);
 [[nodiscard]] Message not_a_number(std::string_view text, std::string_view quantity, std::string_view units);
@@ -59,6 +60,8 @@ namespace swaymark::wording {
                                    const std::optional<std::string>& nearest);
 [[nodiscard]] Message name_twice(std::string_view kind, std::string_view name, Place first);
 [[nodiscard]] Message name_reserved(std::string_view kind, std::string_view name);
+[[nodiscard]] Message name_means_several(std::string_view kind, std::string_view name, std::size_t count);
+[[nodiscard]] Message name_generated(std::string_view kind, std::string_view name, Place lattice);
 [[nodiscard]] Message axis_unknown(std::string_view came, const std::vector<std::string>& axes);
 [[nodiscard]] Message nothing_listed(std::string_view key, std::string_view wanted);
 
@@ -93,6 +96,18 @@ namespace swaymark::wording {
 [[nodiscard]] Message csv_cells(std::size_t came, std::size_t columns);
 [[nodiscard]] Message csv_not_a_number(std::string_view column, std::string_view text, std::string_view unit);
 [[nodiscard]] Message csv_word_without_unit(std::string_view column);
+
+// A lattice by panels.
+[[nodiscard]] Message lattice_needs_space(int dimensions);
+[[nodiscard]] Message lattice_without_material();
+[[nodiscard]] Message legs_meet(std::string_view text, double least);
+[[nodiscard]] Message panel_too_low(std::string_view text, double least);
+[[nodiscard]] Message lattice_too_high(double height, double limit);
+[[nodiscard]] Message lattice_too_many_nodes(double nodes, std::size_t limit);
+[[nodiscard]] Message k_without_horizontals();
+[[nodiscard]] Message k_down_without_horizontals(bool lowest);
+[[nodiscard]] Message diamond_without_mid_nodes();
+[[nodiscard]] Message triangle_is_rigid_in_plan();
 
 // Requests.
 [[nodiscard]] Message band_reversed(double from, double to);
