@@ -11,11 +11,12 @@ namespace swaymark {
 ///
 /// Source: E. L. Wilson, A. Der Kiureghian, E. P. Bayo, Earthquake Engineering & Structural Dynamics 9 (1981)
 /// (from memory); equal to the covariance of two oscillators under white noise. Swapping the modes changes
-/// nothing. Where both dampings are zero it is 1 for equal frequencies and 0 otherwise, the limit. \param
-/// omega [rad/s] > 0    \param damping fractions of critical in [0, 1).
+/// nothing. Where both dampings are zero it is 1 for equal frequencies and 0 otherwise, the limit.
+/// \param omega_i [rad/s] > 0; omega_j likewise.    \param damping_i fraction of critical in [0, 1);
+/// damping_j likewise.
 [[nodiscard]] double cqc_correlation(double omega_i, double omega_j, double damping_i, double damping_j);
 
-/// P = [rho_ij], n_modes x n_modes, of one modal rule: the CQC correlations, or the identity for SRSS.
+/// P = [rho_ij], the CQC correlation of every pair of modes, n_modes x n_modes.
 [[nodiscard]] Eigen::MatrixXd correlation_matrix(const Eigen::VectorXd& omega,
                                                  const Eigen::VectorXd& damping);
 

@@ -2,6 +2,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <utility>
 
 namespace swaymark {
 
@@ -29,7 +30,8 @@ double DesignSpectrum::ordinate(double period) const {
 
 double DesignSpectrum::acceleration(double period, double damping) const {
   const double plain = ordinate(period);
-  if (!statement_.damping_correction) return plain;
+  const bool rigid = period <= 0.0;
+  if (rigid || !statement_.damping_correction) return plain;
   return plain * damping_correction(damping) / damping_correction(*statement_.damping);
 }
 

@@ -4,9 +4,8 @@ namespace swaymark {
 
 namespace {
 
-// \param displacement  u, n_free x m.    \param acceleration  a, n_free x m [m/s2]: what the inertia forces M
-// a of
-//                      these states come from, positive along the forces that bend the tower.
+// displacement u, n_free x m; acceleration a, n_free x m [m/s2]: what the inertia forces M a of these states
+// come from, positive along the forces that bend the tower.
 Responses responses_of(const Assembly& assembly, const std::vector<SupportDof>& supports,
                        const Excitation& excitation, const Eigen::MatrixXd& displacement,
                        const Eigen::MatrixXd& acceleration) {

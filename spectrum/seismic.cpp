@@ -1,6 +1,6 @@
 #include "spectrum/seismic.hpp"
 
-#include <cmath>
+#include <algorithm>
 #include <numbers>
 
 #include "modal/participation.hpp"

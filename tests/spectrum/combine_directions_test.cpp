@@ -4,7 +4,7 @@
 
 namespace swaymark::test {
 
-TEST_CASE("three directions of 3, 2 and 1 combine to 3.742 by SRSS, 3.9 by 100-30 and 4.2 by 100-40") {
+TEST_CASE("three directions of 3 and 2 and 1 combine to 3.742 by SRSS and 3.9 by 100-30 and 4.2 by 100-40") {
   // EN 1998-1:2004 4.3.3.5 and US NRC RG 1.92, from memory; the figures follow by hand.
   const auto one = [](double value) { return Eigen::VectorXd::Constant(1, value); };
   const std::vector<Eigen::VectorXd> peaks{one(3.0), one(2.0), one(1.0)};
