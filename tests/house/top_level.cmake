@@ -1,0 +1,28 @@
+# The top level shows these entries and no other; hidden files and build folders are not looked at.
+cmake_minimum_required(VERSION 3.25)
+include(${CMAKE_CURRENT_LIST_DIR}/house.cmake)
+
+set(folders core modal spectrum apps tests data)
+set(files CMakeLists.txt README.md DEVELOPERS.md LICENSE)
+
+file(GLOB entries LIST_DIRECTORIES true RELATIVE ${ROOT} ${ROOT}/*)
+foreach(entry IN LISTS entries)
+  if(entry MATCHES "^[.]" OR (entry MATCHES "^build" AND IS_DIRECTORY ${ROOT}/${entry}))
+    continue()
+  endif()
+  if(NOT entry IN_LIST folders AND NOT entry IN_LIST files)
+    breach("${entry}: does not belong on the top level")
+  endif()
+endforeach()
+foreach(entry IN LISTS folders)
+  if(NOT IS_DIRECTORY ${ROOT}/${entry})
+    breach("${entry}: the folder is missing")
+  endif()
+endforeach()
+foreach(entry IN LISTS files)
+  if(NOT EXISTS ${ROOT}/${entry} OR IS_DIRECTORY ${ROOT}/${entry})
+    breach("${entry}: the file is missing")
+  endif()
+endforeach()
+
+end_of_script("a top level other than that of the house")
