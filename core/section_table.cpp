@@ -157,15 +157,15 @@ std::vector<std::string> SectionTable::nearest_to(const Designation& wanted) con
 }
 
 Message SectionTable::unknown(std::string_view size) const {
-  const auto wanted = designation_of(size);
-  if (wanted) {
+  if (const auto wanted = designation_of(size)) {
     const auto close = nearest_to(*wanted);
-    if (!close.empty()) return wording::size_unknown(size, close);
+    return close.empty() ? wording::size_family_unknown(wanted->family, families())
+                         : wording::size_unknown(size, close);
   }
   std::vector<std::string> names;
   for (const SectionSize& known : sizes_) names.push_back(known.name);
-  if (const auto close = nearest(size, names)) return wording::size_unknown(size, {*close});
-  return wanted ? wording::size_family_unknown(wanted->family, families()) : wording::size_not_read(size);
+  const auto close = nearest(size, names);
+  return close ? wording::size_unknown(size, {*close}) : wording::size_not_read(size);
 }
 
 }  // namespace swaymark

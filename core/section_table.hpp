@@ -42,10 +42,12 @@ class SectionTable {
   bool add(SectionSize size);
   /// The size, however it is written (see designation_of); nullptr if there is none.
   [[nodiscard]] const SectionSize* find(std::string_view size) const;
-  /// Why find() found nothing: names the nearest sizes of the family, at most three, or the families.
+  /// Why find() found nothing: names the nearest sizes of the family (by ratio, at most three), or the
+  /// families, or the nearest name by spelling.
   [[nodiscard]] Message unknown(std::string_view size) const;
 
-  [[nodiscard]] const std::vector<SectionSize>& sizes() const { return sizes_; }
+  [[nodiscard]] const std::vector<SectionSize>& sizes() const& { return sizes_; }
+  const std::vector<SectionSize>& sizes() && = delete;  // it would not outlive the table
 
  private:
   [[nodiscard]] std::vector<std::string> families() const;

@@ -49,6 +49,24 @@ TEST_CASE("collected faults come out in the order of the file") {
   }
 }
 
+TEST_CASE("faults of another file follow those of the file that names it") {
+  FaultList faults("b.yaml");
+  FaultList other("a.csv");
+  other.add({2, 1}, {"fourth", ""});
+  other.add({1, 1}, {"third", ""});
+  faults.take(std::move(other));
+  faults.add({9, 1}, {"second", ""});
+  faults.add({3, 1}, {"first", ""});
+  CHECK(faults.size() == 4);
+  try {
+    faults.throw_if_any();
+    FAIL("nothing was thrown");
+  } catch (const InputError& error) {
+    CHECK(std::string(error.what()) ==
+          "b.yaml:3:1: first\nb.yaml:9:1: second\na.csv:1:1: third\na.csv:2:1: fourth");
+  }
+}
+
 TEST_CASE("no faults let the reading go on") {
   FaultList faults("a.yaml");
   CHECK(faults.empty());
