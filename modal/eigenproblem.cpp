@@ -136,6 +136,12 @@ Modes Eigenproblem::first(const Modes& modes, Index count) const {
   result.status = ModesStatus::uncounted;
   // A set that ends within a repeated mode is counted past all its copies.
   const Index end = clear_end(modes.omega, count).value_or(modes.count());
+  if (end == modes.count() && modes.certificate) {
+    // What lies beyond the last of the given modes is not known here, but was when they were counted.
+    result.certificate = modes.certificate;
+    result.status = modes.status;
+    return result;
+  }
   const double omega = just_above(modes.omega, end);
   const auto counted = below(omega * omega);
   if (!counted) return result;

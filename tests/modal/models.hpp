@@ -1,0 +1,119 @@
+#pragma once
+
+#include <algorithm>
+#include <cmath>
+#include <random>
+#include <vector>
+
+#include <Eigen/Eigenvalues>
+
+#include "core/assembly.hpp"
+#include "modal/eigenproblem.hpp"
+#include "tests/support/matchers.hpp"
+#include "tests/support/towers.hpp"
+
+/// Matrices of towers, and a second eigensolver to hold the project's against.
+namespace swaymark::test {
+
+struct Model {
+  Assembly assembly;
+  Eigen::MatrixXd drive;  ///< b of every axis, n_free x n_axes
+
+  [[nodiscard]] const SparseMatrix& stiffness() const { return assembly.stiffness; }
+  [[nodiscard]] const SparseMatrix& mass() const { return assembly.mass; }
+  [[nodiscard]] Eigenproblem problem() const { return {assembly.stiffness, assembly.mass}; }
+};
+
+inline Model model_of(const Tower& tower) {
+  Model model{assemble(tower), {}};
+  const auto& axes = model.assembly.dofs.axes();
+  model.drive.resize(model.mass().rows(), static_cast<Index>(axes.size()));
+  for (std::size_t k = 0; k < axes.size(); ++k) {
+    model.drive.col(static_cast<Index>(k)) =
+        inertia_vector(model.assembly, rigid_translation(model.assembly.dofs, axes[k]));
+  }
+  return model;
+}
+
+/// All modes from Eigen's generalized symmetric solver on the full matrices: a general-purpose reference
+/// library that goes another way (Cholesky of M, not of K). M positive definite.
+struct Oracle {
+  Eigen::VectorXd omega;   ///< ascending [rad/s]
+  Eigen::MatrixXd shapes;  ///< M-orthonormal
+};
+
+inline Oracle oracle_of(const Eigen::MatrixXd& stiffness, const Eigen::MatrixXd& mass) {
+  const Eigen::GeneralizedSelfAdjointEigenSolver<Eigen::MatrixXd> solver(stiffness, mass);
+  REQUIRE(solver.info() == Eigen::Success);
+  return {solver.eigenvalues().cwiseSqrt(), solver.eigenvectors()};
+}
+
+inline Oracle oracle_of(const Model& model) {
+  return oracle_of(Eigen::MatrixXd(model.stiffness()), Eigen::MatrixXd(model.mass()));
+}
+
+/// Frequencies of two solvers: each is good to rounding times the spread of the eigenvalues of a small tower.
+inline constexpr double kTwoSolvers = 1e-8;
+
+/// Frequencies agree, and so do the subspaces of all modes that a clear gap separates from the others.
+inline void check_same_modes(const Modes& modes, const Oracle& oracle, const SparseMatrix& mass) {
+  constexpr double clear_gap = 1e-4;  // the angle of a subspace is uncertain by rounding over the gap
+  REQUIRE(modes.count() <= oracle.omega.size());
+  for (Index j = 0; j < modes.count(); ++j) {
+    INFO("mode " << j + 1);
+    CHECK_THAT(modes.omega(j), is_near(oracle.omega(j), kTwoSolvers));
+  }
+  for (Index begin = 0; begin < modes.count();) {
+    Index end = begin + 1;
+    while (end < oracle.omega.size() && oracle.omega(end) / oracle.omega(end - 1) - 1.0 <= clear_gap) ++end;
+    if (end > modes.count()) break;
+    INFO("modes " << begin + 1 << " to " << end);
+    CHECK_THAT(modes.shapes.middleCols(begin, end - begin).eval(),
+               same_subspace(oracle.shapes.middleCols(begin, end - begin), mass));
+    begin = end;
+  }
+}
+
+/// A truss of random nodes, each tied to one more earlier node than it has axes, so that it is stable.
+inline Tower braced_truss(int dimensions, int free_nodes, std::mt19937& random) {
+  std::uniform_real_distribution<double> unit(0.0, 1.0);
+  Tower tower = bare_tower(dimensions);
+  tower.groups.clear();
+  tower.sections.clear();
+  const auto ties = static_cast<std::size_t>(dimensions) + 1;
+  for (std::size_t i = 0; i < ties + static_cast<std::size_t>(free_nodes); ++i) {
+    Eigen::Vector3d position = Eigen::Vector3d::Zero();
+    for (const Axis axis : tower.axes()) position[index_of(axis)] = 10.0 * unit(random);
+    const std::size_t node = add_node(tower, position);
+    if (i < ties) {
+      fix(tower, node);
+      continue;
+    }
+    Section section;
+    section.name = "s" + std::to_string(i);
+    section.area = 1e-4 + 4e-3 * unit(random);
+    tower.sections.push_back(section);
+    tower.groups.push_back({"g" + std::to_string(i), tower.sections.size() - 1, 0, {}});
+    std::vector<std::size_t> earlier;
+    while (earlier.size() < ties) {
+      const std::size_t other = std::uniform_int_distribution<std::size_t>(0, node - 1)(random);
+      if (std::find(earlier.begin(), earlier.end(), other) != earlier.end()) continue;
+      earlier.push_back(other);
+      add_bar(tower, other, node);
+    }
+    if (unit(random) < 0.3) carry(tower, node, 500.0 * unit(random));
+  }
+  return tower;
+}
+
+/// A mast without a mass of its own: only the top nodes have inertia.
+inline Tower massless_mast(int legs, int panels) {
+  Mast mast;
+  mast.legs = legs;
+  mast.panels = panels;
+  Tower tower = regular_mast(mast);
+  tower.materials.front().density = 0.0;
+  return tower;
+}
+
+}  // namespace swaymark::test
