@@ -5,12 +5,23 @@
 
 namespace swaymark::test {
 
+namespace {
+
+Section section_of(const std::string& name, double area) {
+  Section section;
+  section.name = name;
+  section.area = area;
+  return section;
+}
+
+}  // namespace
+
 Tower bare_tower(int dimensions, double area) {
   Tower tower;
   tower.file = "made by a test";
   tower.dimensions = dimensions;
   tower.materials.push_back({"steel", 210e9, 7850.0, {}, {}});
-  tower.sections.push_back({"bar", area, {}, {}, {}});
+  tower.sections.push_back(section_of("bar", area));
   tower.groups.push_back({"bars", 0, 0, {}});
   tower.modes.mass_share = 0.9;
   return tower;
@@ -105,7 +116,7 @@ Tower random_truss(int dimensions, int free_nodes, std::mt19937& random) {
   for (int i = 0; i < anchors; ++i) fix(tower, add_node(tower, place()));
   for (int i = 0; i < free_nodes; ++i) {
     const std::size_t node = add_node(tower, place());
-    tower.sections.push_back({"s" + std::to_string(i), 1e-4 + 4e-3 * unit(random), {}, {}, {}});
+    tower.sections.push_back(section_of("s" + std::to_string(i), 1e-4 + 4e-3 * unit(random)));
     tower.groups.push_back({"g" + std::to_string(i), tower.sections.size() - 1, 0, {}});
     // Bars to any `dimensions + 1` earlier nodes hold the new one: random directions do not lie in a plane.
     for (std::size_t k = 1; k <= static_cast<std::size_t>(anchors); ++k) {
