@@ -1,0 +1,84 @@
+#include "core/tower_file_supports.hpp"
+
+#include "tests/core/tower_text.hpp"
+#include "tests/support/matchers.hpp"
+
+namespace swaymark::test {
+
+TEST_CASE("a support fixes the axes it names at every node it names") {
+  const Tower tower =
+      tower_of(tower_with({"supports: [{nodes: [a], fixed: [x, z]}, {nodes: [b, c], fixed: [z]}]"}));
+  REQUIRE(tower.supports.size() == 3);
+  CHECK(tower.supports[0].fixed == std::array<bool, 3>{true, false, true});
+  CHECK(tower.supports[1].node == 1);
+  CHECK(tower.supports[1].fixed == std::array<bool, 3>{false, false, true});
+  CHECK(tower.supports[2].node == 2);
+}
+
+TEST_CASE("a spring has a stiffness along each axis it names") {
+  const Tower tower = tower_of(tower_with(
+      {"supports: [{nodes: [a], fixed: [x, z]}, {nodes: [b], springs: {x: 50 MN/m, z: 120 kN/mm}}]"}));
+  CHECK_THAT(tower.supports[1].spring[0], is_near(50e6, kRoundoff));
+  CHECK(tower.supports[1].spring[1] == 0.0);
+  CHECK_THAT(tower.supports[1].spring[2], is_near(120e6, kRoundoff));
+}
+
+TEST_CASE("what several entries say of one node is one support") {
+  const Tower tower =
+      tower_of(tower_with({"supports: [{nodes: [a, b], fixed: [z]}, {nodes: [a], fixed: [x]}, {nodes: [b], "
+                           "springs: {x: 1 kN/m}}]"}));
+  REQUIRE(tower.supports.size() == 2);
+  CHECK(tower.supports[0].fixed == std::array<bool, 3>{true, false, true});
+  CHECK(tower.supports[1].fixed == std::array<bool, 3>{false, false, true});
+  CHECK(tower.supports[1].spring[0] == 1000.0);
+}
+
+TEST_CASE("a tower without supports is read because it may be meant to float") {
+  std::string text = tower_with({});
+  text.erase(text.find("supports"));
+  CHECK(tower_of(text).supports.empty());
+}
+
+TEST_CASE("an axis held twice at a node is refused where it is held again") {
+  CHECK(refusals_with("supports: [{nodes: [a, b], fixed: [x, z]}, {nodes: [b], fixed: [z]}]") ==
+        Refusals{"7:44 node 'b' is held twice along z, first in line 7"});
+  CHECK(refusals_with(
+            "supports: [{nodes: [a], fixed: [x, z]}, {nodes: [b], fixed: [x], springs: {x: 1 MN/m}}]") ==
+        Refusals{"7:41 node 'b' is held twice along x, first in line 7"});
+  CHECK(refusals_with("supports: [{nodes: [a, a], fixed: [x, z]}]") ==
+        Refusals{"7:24 the node 'a' is named twice, first in line 7"});
+}
+
+TEST_CASE("an axis the tower does not have cannot be held") {
+  CHECK(refusals_with("supports: [{nodes: [a, b], fixed: [x, y]}]") ==
+        Refusals{"7:39 'y' is no axis of this tower"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], fixed: [x, [z]]}]") ==
+        Refusals{"7:39 a list is no axis of this tower"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], springs: {y: 1 MN/m}}]") ==
+        Refusals{"7:38 unknown key 'y' in 'springs'"});
+}
+
+TEST_CASE("a support must hold something somewhere") {
+  CHECK(refusals_with("supports: [{nodes: [a, b]}]") ==
+        Refusals{"7:12 a support needs 'fixed' or 'springs'"});
+  CHECK(refusals_with("supports: [{fixed: [x]}]") == Refusals{"7:12 'nodes' is missing in a support"});
+  CHECK(refusals_with("supports: [{nodes: [], fixed: [x]}]") == Refusals{"7:20 'nodes' lists nothing"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], fixed: []}]") == Refusals{"7:35 'fixed' lists nothing"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], fixed: x}]") ==
+        Refusals{"7:35 'fixed' wants a list of axes, got 'x'"});
+  CHECK(refusals_with("supports: [{nodes: [a, q], fixed: [x]}]") == Refusals{"7:24 there is no node 'q'"});
+}
+
+TEST_CASE("a spring is a stiffness above zero") {
+  CHECK(refusals_with("supports: [{nodes: [a, b], springs: {x: 0, z: -1 MN/m}}]") ==
+        Refusals{"7:41 'x' must be above zero, got '0'", "7:47 'z' must be above zero, got '-1 MN/m'"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], springs: {x: 5 kN}}]") ==
+        Refusals{"7:41 'x': a stiffness was wanted, got '5 kN', which is a force"});
+}
+
+TEST_CASE("a pad of a later version is the only fault of its support") {
+  CHECK(refusals_with("supports: [{nodes: [a, b], pad: {width: 2 m}}]") ==
+        Refusals{"7:28 'pad': springs from a pad and its soil are not yet supported"});
+}
+
+}  // namespace swaymark::test
