@@ -199,7 +199,7 @@ const YamlNode* MapView::entry(std::string_view key) const {
 }
 
 const YamlNode* MapView::find(std::string_view key) {
-  known_.emplace_back(key);
+  if (std::find(known_.begin(), known_.end(), key) == known_.end()) known_.emplace_back(key);
   const YamlNode* found = entry(key);
   if (found == nullptr) return nullptr;
   const YamlNode* value = found + 1;
