@@ -46,6 +46,10 @@ class SectionTable {
   /// families, or the nearest name by spelling.
   [[nodiscard]] Message unknown(std::string_view size) const;
 
+  /// Sizes are missing that could not be read; an unknown one may be one of them, and is no fault.
+  void leave_open() { open_ = true; }
+  [[nodiscard]] bool is_open() const { return open_; }
+
   [[nodiscard]] const std::vector<SectionSize>& sizes() const& { return sizes_; }
   const std::vector<SectionSize>& sizes() && = delete;  // it would not outlive the table
 
@@ -55,6 +59,7 @@ class SectionTable {
 
   std::vector<SectionSize> sizes_;
   std::unordered_map<std::string, std::size_t> index_;  ///< by the name as find() compares it
+  bool open_ = false;
 };
 
 }  // namespace swaymark

@@ -30,10 +30,10 @@ struct Section {
   std::string name;
   double area = 0.0;                 ///< [m2] > 0
   std::optional<double> radius;      ///< smallest radius of gyration [m]
-  std::optional<double> perimeter;   ///< of the outline [m], what paint and ice cover
-  std::string size;                  ///< as the tables write it, `L 80x80x8`; empty where not given by size
   std::optional<std::string> curve;  ///< buckling curve a0, a, b, c, d (EN 1993-1-1)
   Place place;
+  std::optional<double> perimeter = {};  ///< of the outline [m], what paint and ice cover
+  std::string size = {};  ///< as the tables write it, `L 80x80x8`; empty where not given by size
 };
 
 struct Node {
@@ -97,7 +97,7 @@ struct Allowance {
 struct LooseNodes {
   std::string what;                ///< a sentence without a full stop
   std::vector<std::size_t> nodes;  ///< that can move
-  std::size_t motions = 0;         ///< independent ones, with the base held
+  std::size_t motions = 0;         ///< independent ones at most, with the base held
   std::vector<std::string> cures;
 };
 

@@ -51,7 +51,7 @@ void read_size(const YamlNode& value, std::optional<double> gap, const SectionTa
   if (!word) return;
   const SectionSize* size = sizes.find(*word);
   if (size == nullptr) {
-    faults.add(value.place, sizes.unknown(*word));
+    if (!sizes.is_open()) faults.add(value.place, sizes.unknown(*word));
     return;
   }
   section.size = size->name;
@@ -85,14 +85,15 @@ void check_ways(const MapView& view, Place place) {
 
 SectionTable read_section_sizes(MapView& file, const std::string& tower_file, const FileSource& source) {
   SectionTable sizes = SectionTable::built_in();
-  const YamlNode* node = file.find("sections_from");
-  if (node == nullptr) return sizes;
-  const auto name = read_word(*node, "sections_from", file.faults());
-  if (!name) return sizes;
-  const auto other = fetch(tower_file, *name, source, node->place, file.faults());
-  if (!other) return sizes;
-  FaultList faults(other->path);
-  read_section_csv(other->text, faults, sizes);
+  if (!file.has("sections_from")) return sizes;
+  std::optional<OtherFile> other;
+  if (const YamlNode* node = file.find("sections_from")) {
+    const auto name = read_word(*node, "sections_from", file.faults());
+    if (name) other = fetch(tower_file, *name, source, node->place, file.faults());
+  }
+  FaultList faults(other ? other->path : std::string());
+  if (other) read_section_csv(other->text, faults, sizes);
+  if (!other || !faults.empty()) sizes.leave_open();
   file.faults().take(std::move(faults));
   return sizes;
 }

@@ -124,14 +124,19 @@ TEST_CASE("an angle of a table of its own is not doubled as its dimensions are n
 }
 
 TEST_CASE("faults of a table beside the tower file carry its own name and place and come last") {
-  const std::string shown = refusal_beside("L 85x8", "size,area [cm2]\nrod,0\n");
-  CHECK_THAT(shown, Catch::StartsWith("site/tower.yaml:4:24: there is no size 'L 85x8'") &&
+  const std::string shown = refusal_beside("L 80x8, radius: 2 cm", "size,area [cm2]\nrod,0\n");
+  CHECK_THAT(shown, Catch::StartsWith("site/tower.yaml:4:12: 'radius' stands beside 'size'") &&
                         Catch::Contains("\nsite/my_sections.csv:2:5: 'area' must be above zero"));
 }
 
-TEST_CASE("a size whose row is faulty is no second fault where it is used") {
-  const std::string shown = refusal_beside("rod", "size,area [cm2]\nrod,0\n");
-  CHECK_THAT(shown, Catch::StartsWith("site/my_sections.csv:2:5: ") && !Catch::Contains("\n"));
+TEST_CASE("a size that a faulty table may have had is no second fault where it is used") {
+  const std::vector<std::pair<std::string, std::string>> cases{
+      {"rod", "size,area [cm2]\nrod,0\n"}, {"rod", "size,area [cm2]\nrod\n"}, {"rod", "size;area\nrod;1\n"}};
+  for (const auto& [size, table] : cases) {
+    const std::string shown = refusal_beside(size, table);
+    CHECK_THAT(shown, Catch::StartsWith("site/my_sections.csv:") && !Catch::Contains("\n"));
+  }
+  CHECK_THAT(refusal_beside("rod", "size,area [cm2]\nbar,1\n"), Catch::StartsWith("site/tower.yaml:4:24: "));
 }
 
 TEST_CASE("a table is refused where no other file can be reached and where it is no name") {

@@ -33,7 +33,15 @@ std::vector<Message> messages_about(std::string_view text) {
           name_unknown("node", text, std::nullopt),
           name_twice("node", text, {3, 1}),
           name_reserved("group", text),
-          coordinates_count(text, 2, {"x", "y", "z"})};
+          coordinates_count(text, 2, {"x", "y", "z"}),
+          size_not_read(text),
+          size_unknown(text, {"L 80x80x8"}),
+          size_family_unknown(text, {"L", "CHS", "SHS"}),
+          size_listed_already(text),
+          no_other_files(text),
+          csv_not_a_number("area", text, "cm2"),
+          csv_not_a_number(text, "x", text),
+          csv_word_without_unit(text)};
 }
 
 }  // namespace
@@ -55,6 +63,7 @@ TEST_CASE("every message says what is wrong and what would cure it") {
                                    key_missing("E", "material 'steel'", "E: 210 GPa"),
                                    keys_exclude("area", "tube", "section 'leg'"),
                                    one_key_of("'area' or 'tube'", "section 'leg'"),
+                                   wants_map("a band", "'rotor'"),
                                    not_yet_supported("'lattice': towers written by panels are"),
                                    axis_unknown("'q'", {"x", "z"}),
                                    nothing_listed("bars", "[from, to] pairs"),
@@ -73,7 +82,15 @@ TEST_CASE("every message says what is wrong and what would cure it") {
                                    log_needs_positive(),
                                    correction_needs_damping(),
                                    seismic_needs_damping(),
-                                   no_direction_excited()};
+                                   no_direction_excited(),
+                                   radius_beside_size("section 'leg'"),
+                                   double_needs_angle(),
+                                   gap_needs_double(),
+                                   csv_too_long(2, 1),
+                                   csv_empty(),
+                                   csv_quote(),
+                                   csv_separator(),
+                                   csv_cells(2, 3)};
   messages.insert(messages.end(), plain.begin(), plain.end());
   for (const Message& message : messages) {
     INFO(message.what << "; " << message.cure);
