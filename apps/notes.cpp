@@ -5,6 +5,7 @@
 
 #include <fmt/format.h>
 
+#include "apps/plausibility.hpp"
 #include "apps/report_parts.hpp"
 
 namespace swaymark {
@@ -12,6 +13,18 @@ namespace swaymark {
 namespace {
 
 using Notes = std::vector<std::string>;
+
+void about_shapes(const Analysis& analysis, Notes& notes) {
+  for (Index j = 0; j < analysis.mode_count(); ++j) {
+    const std::string& character = analysis.character[static_cast<std::size_t>(j)];
+    if (character.starts_with("sway")) return;
+    if (character != "breathing") continue;
+    notes.push_back(fmt::format(
+        "Mode {} ({:.3f} Hz), below every sway, changes the shape of the section: is plan bracing missing?",
+        j + 1, analysis.frequency(j)));
+    return;
+  }
+}
 
 void about_unused(const Analysis& analysis, Notes& notes) {
   const Tower& tower = analysis.tower;
@@ -59,12 +72,16 @@ void about_bands(const Analysis& analysis, Notes& notes) {
   for (std::size_t b = 0; b < analysis.bands.size(); ++b) {
     const auto& slight = analysis.bands[b].slight;
     if (slight.empty()) continue;
+    const BandStatement& band = analysis.tower.bands[b];
+    const std::string direction = band.direction == BandDirection::any
+                                      ? "in any one direction"
+                                      : fmt::format("in direction {}", name_of(band.direction));
     notes.push_back(fmt::format(
-        "Band {}: mode{} {} within it or its margin, with less than {:.0f} % of the moving mass along "
-        "'{}', do{} not count. A force applied at one node may still excite {}.",
-        band_name(analysis.tower.bands[b]), slight.size() > 1 ? "s" : "", mode_list(slight),
-        100.0 * kCountsForBand, name_of(analysis.tower.bands[b].direction), slight.size() > 1 ? "" : "es",
-        slight.size() > 1 ? "them" : "it"));
+        "Band {}: mode{} {} within it or its margin do{} not count, with less than {:.0f} % of the moving "
+        "mass {}. "
+        "A force at one node, or off the centre, may still excite {}.",
+        band_name(band), slight.size() > 1 ? "s" : "", mode_list(slight), slight.size() > 1 ? "" : "es",
+        100.0 * kCountsForBand, direction, slight.size() > 1 ? "them" : "it"));
   }
 }
 
@@ -133,12 +150,15 @@ void about_combination(const Analysis& analysis, Notes& notes) {
 std::vector<std::string> notes_of(const Analysis& analysis) {
   Notes notes;
   about_modes(analysis, notes);
+  about_shapes(analysis, notes);
   about_bands(analysis, notes);
   if (analysis.seismic) {
     about_spectra(analysis, notes);
     about_combination(analysis, notes);
   }
   about_unused(analysis, notes);
+  const Notes plausibility = plausibility_notes(analysis);
+  notes.insert(notes.end(), plausibility.begin(), plausibility.end());
   return notes;
 }
 

@@ -20,6 +20,11 @@ std::string band_name(const BandStatement& band) {
   return fmt::format("{}, harmonic {}", band.label, band.harmonic);
 }
 
+std::string bar_ends(const Tower& tower, std::size_t bar) {
+  return fmt::format("{} to {}", tower.nodes[tower.bars[bar].from].name,
+                     tower.nodes[tower.bars[bar].to].name);
+}
+
 Extremes bar_extremes(double gravity, double seismic) {
   return {std::max(0.0, gravity + seismic), std::max(0.0, seismic - gravity)};
 }

@@ -14,6 +14,9 @@ namespace swaymark {
 /// "pump set", or "pump set, harmonic 2".
 [[nodiscard]] std::string band_name(const BandStatement& band);
 
+/// "5 to 9": the nodes a bar joins.
+[[nodiscard]] std::string bar_ends(const Tower& tower, std::size_t bar);
+
 /// Largest tension and largest compression of gravity +/- seismic [N], each >= 0.
 struct Extremes {
   double tension = 0.0;

@@ -103,6 +103,7 @@ class SeismicSection {
     out_ += section_head(
         fmt::format("Most loaded bars ({} of {}; gravity +/- seismic)", order.size(), largest.size()));
     Table table({{{"bar"}, Align::left},
+                 {{"between nodes"}, Align::left},
                  {{"gravity", "[kN]"}, Align::right},
                  {{"seismic", "[kN]"}, Align::right},
                  {{"tension", "[kN]"}, Align::right},
@@ -110,8 +111,8 @@ class SeismicSection {
     for (const std::size_t b : order) {
       const auto row = static_cast<Index>(b);
       const Extremes e = bar_extremes(s.bar_gravity(row), s.bar_force(row));
-      table.add({a_.tower.bar_name(b), kilo(s.bar_gravity(row)), kilo(s.bar_force(row)), kilo(e.tension),
-                 kilo(e.compression)});
+      table.add({a_.tower.bar_name(b), bar_ends(a_.tower, b), kilo(s.bar_gravity(row)),
+                 kilo(s.bar_force(row)), kilo(e.tension), kilo(e.compression)});
     }
     out_ += table.text();
   }
@@ -120,7 +121,8 @@ class SeismicSection {
     const Eigen::MatrixXd all = node_displacements(a_);
     std::vector<double> sizes;
     for (Index i = 0; i < all.rows(); ++i) sizes.push_back(all.row(i).maxCoeff());
-    const auto order = ranked(sizes);
+    auto order = ranked(sizes);
+    std::erase_if(order, [&](std::size_t node) { return sizes[node] == 0.0; });  // held, or at rest
     out_ += section_head(fmt::format("Largest seismic displacements ({} of {} nodes; each axis by itself)",
                                      order.size(), sizes.size()));
     std::vector<Table::Column> columns{{{"node"}, Align::left}};

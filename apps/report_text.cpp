@@ -6,8 +6,10 @@
 #include <fmt/format.h>
 
 #include "apps/figure.hpp"
+#include "apps/report_model.hpp"
 #include "apps/report_parts.hpp"
 #include "apps/report_seismic.hpp"
+#include "apps/report_summary.hpp"
 #include "apps/table.hpp"
 
 namespace swaymark {
@@ -22,7 +24,8 @@ class TextReport {
 
   std::string write() {
     head();
-    model();
+    out_ += summary_section(a_);
+    out_ += model_section(a_);
     ledger();
     modes();
     if (a_.scope == Scope::check) {
@@ -60,14 +63,6 @@ class TextReport {
     const std::string text = met ? "met" : "NOT MET";
     if (!style_.colour) return text;
     return fmt::format("\x1b[{}m{}\x1b[0m", met ? "32" : "1;31", text);
-  }
-
-  void model() {
-    const Tower& tower = a_.tower;
-    out_ += section_head("MODEL");
-    out_ += fmt::format("  {} dimension{}, {} nodes, {} bars, {} free degrees of freedom, {} mass matrix\n",
-                        tower.dimensions, tower.dimensions == 1 ? "" : "s", tower.nodes.size(),
-                        tower.bars.size(), a_.assembly.dofs.free_count(), name_of(tower.mass_scheme));
   }
 
   void ledger() {

@@ -1,7 +1,9 @@
 #include "apps/table.hpp"
 
 #include <algorithm>
+#include <array>
 #include <sstream>
+#include <string_view>
 
 namespace swaymark {
 
@@ -10,6 +12,30 @@ namespace {
 std::string padded(const std::string& cell, std::size_t width, Table::Align align) {
   const std::string blanks(width - std::min(width, columns_of(cell)), ' ');
   return align == Table::Align::left ? cell + blanks : blanks + cell;
+}
+
+// Whether a word is the unit of a figure before it, with or without a punctuation mark behind.
+bool is_unit(std::string word) {
+  while (!word.empty() && std::string_view(".,;:)").find(word.back()) != std::string_view::npos)
+    word.pop_back();
+  static constexpr std::array<std::string_view, 10> units{"%", "Hz", "kN", "kNm",  "kg",
+                                                          "m", "s",  "g",  "MN/m", "kg/m3"};
+  return std::find(units.begin(), units.end(), word) != units.end();
+}
+
+// The words of a text; a figure and its unit are one, so that no line begins with a unit.
+std::vector<std::string> unbroken_words(const std::string& text) {
+  std::istringstream stream(text);
+  std::vector<std::string> words;
+  for (std::string word; stream >> word;) {
+    const bool after_figure = !words.empty() && words.back().back() >= '0' && words.back().back() <= '9';
+    if (after_figure && is_unit(word)) {
+      words.back() += " " + word;
+    } else {
+      words.push_back(word);
+    }
+  }
+  return words;
 }
 
 }  // namespace
@@ -54,11 +80,11 @@ std::string Table::text() const {
 std::string section_head(const std::string& words) { return "\n" + words + "\n"; }
 
 std::string wrapped(const std::string& text, const std::string& lead, std::size_t width) {
-  std::istringstream words(text);
+  const std::vector<std::string> words = unbroken_words(text);
   std::string result;
   std::string line = lead;
   bool fresh = true;
-  for (std::string word; words >> word;) {
+  for (const std::string& word : words) {
     if (!fresh && columns_of(line) + 1 + columns_of(word) > width) {
       result += line + "\n";
       line = std::string(columns_of(lead), ' ');

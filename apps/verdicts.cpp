@@ -25,6 +25,13 @@ std::string modes_in_words(const Analysis& analysis, const std::vector<Index>& m
   return text;
 }
 
+std::string nearest_words(const Analysis& analysis, const BandResult& result) {
+  if (!result.nearest) return "; no mode kept counts in this direction";
+  const std::string nearest = "; nearest is " + modes_in_words(analysis, {*result.nearest});
+  if (result.clearance > 1.0) return nearest;
+  return nearest + fmt::format(", {:.1f} % away", 100.0 * result.clearance);
+}
+
 Verdict band_verdict(const Analysis& analysis, std::size_t b) {
   const BandStatement& band = analysis.tower.bands[b];
   const BandResult& result = analysis.bands[b];
@@ -34,9 +41,9 @@ Verdict band_verdict(const Analysis& analysis, std::size_t b) {
   const std::string range = fmt::format("{:.3f} to {:.3f} Hz", band.from, band.to);
   switch (result.verdict) {
     case BandVerdict::clear:
-      verdict.detail = band.margin > 0.0 ? fmt::format("no mode within {} or its margin of {:.3g} %", range,
-                                                       100.0 * band.margin)
-                                         : fmt::format("no mode within {}", range);
+      verdict.detail = fmt::format("no mode that counts within {}", range);
+      if (band.margin > 0.0) verdict.detail += fmt::format(" or its margin of {:.3g} %", 100.0 * band.margin);
+      verdict.detail += nearest_words(analysis, result);
       break;
     case BandVerdict::close:
       verdict.detail = fmt::format("within the margin of {:.3g} % outside {}: {}", 100.0 * band.margin, range,
@@ -46,6 +53,8 @@ Verdict band_verdict(const Analysis& analysis, std::size_t b) {
       verdict.detail = fmt::format("inside {}: {}", range, modes_in_words(analysis, result.inside));
       break;
   }
+  if (!result.slight.empty())
+    verdict.detail += fmt::format("; does not count: {}", modes_in_words(analysis, result.slight));
   return verdict;
 }
 

@@ -40,6 +40,14 @@ bool splits_repeated(const Eigen::VectorXd& omega, Index count) {
   return count > 0 && count < omega.size() && omega(count) - omega(count - 1) <= 1e-6 * omega(count - 1);
 }
 
+// What was looked for up to a frequency is certified up to it, not only to just above the last mode below it.
+void certify_up_to(const Eigenproblem& problem, double omega, Modes& modes) {
+  if (!modes.certificate || omega <= modes.certificate->omega) return;
+  const auto counted = problem.below(std::pow(omega * (1.0 + 1e-9), 2));
+  if (counted && counted->below == modes.count())
+    modes.certificate = Certificate{counted->below, std::sqrt(counted->omega_squared)};
+}
+
 }  // namespace
 
 ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness, const SparseMatrix& mass,
@@ -48,7 +56,8 @@ ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness, c
   set.available = problem.mode_count();
   set.moving = moving_mass(mass, drive);
   const Index most = problem.most_modes();
-  Index least = std::max<Index>(1, target.count.value_or(1));
+  // More modes than there are cannot be missing: asking for them gives all.
+  Index least = std::clamp<Index>(target.count.value_or(1), 1, set.available);
   if (target.omega_up_to) least = std::max(least, modes_up_to(problem, *target.omega_up_to));
   if (target.omega_covered) least = std::max(least, modes_up_to(problem, *target.omega_covered));
   Index tried = target.mass_share ? std::max(kFirstTry, least) : least;
@@ -74,6 +83,8 @@ ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness, c
     keep = std::min(keep, found.count());
     set.cut_repeated = splits_repeated(found.omega, keep);
     set.modes = problem.first(found, keep);
+    certify_up_to(problem, std::max(target.omega_up_to.value_or(0.0), target.omega_covered.value_or(0.0)),
+                  set.modes);
     set.participation.conservativeResize(keep, Eigen::NoChange);
     return set;
   }

@@ -22,6 +22,12 @@ double ratio_along(BandDirection direction, const Eigen::Vector3d& ratio) {
   return 0.0;
 }
 
+double clearance_of(const BandStatement& band, double frequency) {
+  if (frequency < band.from) return 1.0 - frequency / band.from;
+  if (frequency > band.to) return frequency / band.to - 1.0;
+  return 0.0;
+}
+
 }  // namespace
 
 std::string_view name_of(BandVerdict verdict) {
@@ -43,10 +49,15 @@ BandResult examine_band(const BandStatement& band, const Eigen::VectorXd& freque
   BandResult result;
   for (Index mode = 0; mode < frequency.size(); ++mode) {
     const double f = frequency(mode);
+    const bool counts = ratio_along(band.direction, mass_ratio.row(mode).transpose()) >= kCountsForBand;
+    const double clearance = clearance_of(band, f);
+    if (counts && (!result.nearest || clearance < result.clearance)) {
+      result.nearest = mode;
+      result.clearance = clearance;
+    }
     const bool inside = f >= band.from && f <= band.to;
     const bool near = f >= band.from * (1.0 - band.margin) && f <= band_reach(band);
     if (!near) continue;
-    const bool counts = ratio_along(band.direction, mass_ratio.row(mode).transpose()) >= kCountsForBand;
     if (!counts) {
       result.slight.push_back(mode);
     } else {

@@ -1,5 +1,6 @@
 #pragma once
 
+#include <optional>
 #include <string_view>
 #include <vector>
 
@@ -21,7 +22,9 @@ struct BandResult {
   std::vector<Index>
       inside;                ///< modes that count and lie within the band, its ends included; numbered from 0
   std::vector<Index> close;  ///< modes that count and lie within the margin outside it
-  std::vector<Index> slight;  ///< modes within band or margin that take too little mass to count
+  std::vector<Index> slight;     ///< modes within band or margin that take too little mass to count
+  std::optional<Index> nearest;  ///< of the modes that count, the one closest to the band; inside or not
+  double clearance = 0.0;        ///< its distance outside the band as a share of the band's end; 0 inside it
 };
 
 /// The highest frequency [Hz] that matters to the band.

@@ -1,0 +1,117 @@
+#include "apps/plausibility.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+#include <fmt/format.h>
+
+#include "core/quantity.hpp"
+
+namespace swaymark {
+
+namespace {
+
+using Notes = std::vector<std::string>;
+
+bool within(double value, double low, double high) { return value >= low && value <= high; }
+
+// The tower's height [m]; zero where it has no vertical axis.
+double height_of(const Tower& tower) {
+  if (tower.dimensions == 1 || tower.nodes.empty()) return 0.0;
+  const auto below = [](const Node& a, const Node& b) { return a.position.z() < b.position.z(); };
+  const auto [low, high] = std::minmax_element(tower.nodes.begin(), tower.nodes.end(), below);
+  return high->position.z() - low->position.z();
+}
+
+void about_densities(const Tower& tower, Notes& notes) {
+  for (const Material& material : tower.materials) {
+    if (material.density == 0.0) continue;  // stated on purpose: the bars carry no mass of their own
+    const bool steel = within(material.youngs_modulus, 180e9, 230e9);
+    if (steel && !within(material.density, 7000.0, 8500.0)) {
+      notes.push_back(
+          fmt::format("Plausible? Material '{}' has the modulus of steel but {:.4g} kg/m3; steel has 7850.",
+                      material.name, material.density));
+    } else if (!within(material.density, 1500.0, 23'000.0)) {
+      notes.push_back(fmt::format("Plausible? Material '{}' has {:.4g} kg/m3, which is no metal's.",
+                                  material.name, material.density));
+    }
+  }
+}
+
+// What a bare number in the wrong unit looks like: 210 for 210 GPa, 990 rpm as 990 Hz, 0.08 for 0.08 g.
+void about_units(const Tower& tower, Notes& notes) {
+  for (const Material& material : tower.materials) {
+    if (material.youngs_modulus >= 1e9) continue;
+    notes.push_back(fmt::format("Plausible? Material '{}' has E = {:.4g} Pa; a bare number is in Pa.",
+                                material.name, material.youngs_modulus));
+  }
+  for (const BandStatement& band : tower.bands) {
+    if (band.to <= 200.0) continue;
+    notes.push_back(fmt::format("Plausible? Band '{}' reaches {:.4g} Hz; a bare number is in Hz, not rpm.",
+                                band.label, band.to));
+  }
+  for (const SpectrumStatement& spectrum : tower.spectra) {
+    double largest = 0.0;
+    for (const auto& [period, acceleration] : spectrum.points) largest = std::max(largest, acceleration);
+    if (within(largest, 0.02 * kStandardGravity, 5.0 * kStandardGravity)) continue;
+    notes.push_back(
+        fmt::format("Plausible? Spectrum '{}' has at most {:.4g} g; a bare number is in m/s2, not g.",
+                    spectrum.name, largest / kStandardGravity));
+  }
+}
+
+void about_lengths(const Analysis& analysis, double height, Notes& notes) {
+  const auto& bars = analysis.assembly.bars;
+  if (height <= 0.0 || bars.empty()) return;
+  const auto longest = std::max_element(
+      bars.begin(), bars.end(), [](const BarElement& a, const BarElement& b) { return a.length < b.length; });
+  if (longest->length <= 1.5 * height) return;
+  notes.push_back(fmt::format("Plausible? Bar {} is {:.4g} m long, the tower {:.4g} m high.",
+                              analysis.tower.bar_name(static_cast<std::size_t>(longest - bars.begin())),
+                              longest->length, height));
+}
+
+void about_masses(const Analysis& analysis, double height, Notes& notes) {
+  const MassLedger& ledger = analysis.ledger;
+  for (const LedgerEntry& entry : ledger.entries) {
+    if (entry.origin != MassOrigin::discrete || ledger.bars <= 0.0) continue;
+    if (std::abs(entry.mass / ledger.bars - 1.0) > 0.01) continue;
+    notes.push_back(
+        fmt::format("Plausible? The mass{} of {:.4g} kg equals that of the bars, which their density "
+                    "gives already: is it counted twice?",
+                    entry.label.empty() ? "" : " '" + entry.label + "'", entry.mass));
+  }
+  if (ledger.bars > 0.0 && ledger.carried > 20.0 * ledger.bars) {
+    notes.push_back(fmt::format("Plausible? The tower carries {:.3g} times the mass of its bars.",
+                                ledger.carried / ledger.bars));
+  }
+  if (height > 0.0 && !within(ledger.total() / height, 2.0, 50'000.0)) {
+    notes.push_back(fmt::format("Plausible? {:.4g} kg on a height of {:.4g} m is far from common.",
+                                ledger.total(), height));
+  }
+}
+
+void about_frequency(const Analysis& analysis, double height, Notes& notes) {
+  if (height <= 0.0 || analysis.mode_count() == 0) return;
+  const double low = 10.0 / height;
+  const double high = 300.0 / height;
+  if (within(analysis.frequency(0), low, high)) return;
+  notes.push_back(
+      fmt::format("Plausible? f1 = {:.4g} Hz; lattice towers {:.4g} m high mostly have {:.2g} to {:.2g} Hz.",
+                  analysis.frequency(0), height, low, high));
+}
+
+}  // namespace
+
+std::vector<std::string> plausibility_notes(const Analysis& analysis) {
+  Notes notes;
+  const double height = height_of(analysis.tower);
+  about_densities(analysis.tower, notes);
+  about_units(analysis.tower, notes);
+  about_lengths(analysis, height, notes);
+  about_masses(analysis, height, notes);
+  about_frequency(analysis, height, notes);
+  return notes;
+}
+
+}  // namespace swaymark

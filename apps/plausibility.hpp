@@ -1,0 +1,18 @@
+#pragma once
+
+#include <string>
+#include <vector>
+
+#include "apps/analysis.hpp"
+
+namespace swaymark {
+
+/// Figures that are possible but seldom meant: mistaken units, masses counted twice. Each is a note, never a
+/// fault.
+///
+/// The limits are common practice, no source: steel weighs 7000 to 8500 kg/m3 and other metals 1500 to 23
+/// 000; a bar is rarely longer than one and a half times the tower's height; a lattice tower of height h [m]
+/// has f1 between 10/h and 300/h [Hz] and 2 to 50 000 kg per metre of height.
+[[nodiscard]] std::vector<std::string> plausibility_notes(const Analysis& analysis);
+
+}  // namespace swaymark
