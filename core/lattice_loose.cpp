@@ -38,36 +38,20 @@ bool has_diamond(const LatticeLevel& level) {
          level.panel->plan_bracing->pattern == PlanPattern::diamond;
 }
 
-// Bars of the plan bracing between the corners of a level.
-std::size_t plan_diagonals(const LatticeLevel& level) {
-  if (!level.panel->plan_bracing) return 0;
-  switch (level.panel->plan_bracing->pattern) {
-    case PlanPattern::diagonal:
-      return 1;
-    case PlanPattern::crossed:
-      return 2;
-    case PlanPattern::diamond:
-      return 0;
-  }
-  return 0;
-}
-
-// The faces of the panel under a level that nothing keeps from moving within their planes.
+// How many faces of the panel under a level may move within their planes: at most, since bars in plan link
+// their motions.
 std::size_t slack_faces(const Lattice& lattice, std::size_t number) {
-  const std::size_t faces = lattice.levels[number].corners.size();
   const LatticePanel& panel = *lattice.levels[number].panel;
   const bool needs_horizontal = panel.bracing == Bracing::single || panel.bracing == Bracing::alternating ||
                                 panel.bracing == Bracing::k_down;
   if (!needs_horizontal || panel.horizontals) return 0;
-  std::size_t made_up = plan_diagonals(lattice.levels[number]);
   // X-bracing passes the distance between its top corners down to its bottom corners.
   for (std::size_t above = number + 1; above < lattice.levels.size(); ++above) {
-    const LatticeLevel& level = lattice.levels[above];
-    if (level.panel->bracing != Bracing::x) break;
-    if (level.panel->horizontals) return 0;
-    made_up += plan_diagonals(level);
+    const LatticePanel& next = *lattice.levels[above].panel;
+    if (next.bracing != Bracing::x) break;
+    if (next.horizontals) return 0;
   }
-  return faces - std::min(faces, made_up);
+  return lattice.levels[number].corners.size();
 }
 
 std::string plural(std::size_t count, std::string_view one, std::string_view many) {
@@ -165,7 +149,9 @@ class Search {
   void about_slack(LooseNodes& loose, Bracing bracing) {
     const std::size_t levels = loose.nodes.size() / lattice_.levels[0].corners.size();
     loose.what = fmt::format(
-        "bracing '{}' without horizontals leaves the corners of {}, {}, free to move within the faces, in {}",
+        "bracing '{}' without horizontals leaves the corners of {}, {}, free to move within the faces, in up "
+        "to "
+        "{}",
         name_of(bracing), plural(levels, "level", "levels"), range(loose),
         plural(loose.motions, "way", "ways"));
     loose.cures = {"'horizontals' in these panels", "or 'bracing: X' in these panels"};
