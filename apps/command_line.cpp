@@ -56,6 +56,14 @@ std::optional<Parsed> known_later(const std::string& command) {
   return usage_error(fmt::format("the command '{}' is not yet supported", command));
 }
 
+std::vector<std::string> options() {
+  return {"--json", "--csv", "--shapes", "--color", "--no-color", "--help", "--version"};
+}
+
+bool is(const CLI::ParseError& error, CLI::ExitCodes kind) {
+  return error.get_exit_code() == static_cast<int>(kind);
+}
+
 void add_options(CLI::App& app, Command& command, std::string& colour, bool& no_colour) {
   app.set_help_flag();  // one help text for all: see kHelp
   app.add_option("tower", command.tower)->required();
@@ -66,28 +74,63 @@ void add_options(CLI::App& app, Command& command, std::string& colour, bool& no_
   app.add_flag("--no-color", no_colour);
 }
 
-// CLI11 says what is wrong; where an option is unknown, the nearest one is named as well.
-std::string reason_of(const CLI::ParseError& error, const std::vector<std::string>& arguments) {
-  static const std::vector<std::string> options{"--json",     "--csv",  "--shapes", "--color",
-                                                "--no-color", "--help", "--version"};
-  if (error.get_name() == "ExtrasError") {
-    for (const std::string& argument : arguments) {
-      if (!argument.starts_with('-') || argument.size() < 2) continue;
-      const std::string name = argument.substr(0, argument.find('='));
-      if (std::find(options.begin(), options.end(), name) != options.end()) continue;
-      const auto close = nearest(name, options);
-      return close ? fmt::format("unknown option '{}', did you mean '{}'?", name, *close)
-                   : fmt::format("unknown option '{}'", name);
-    }
-    return "more than one tower file is named";
+// The first argument that looks like an option and is none.
+std::string about_extras(const std::vector<std::string>& arguments) {
+  const auto known = options();
+  const auto options_end = std::find(arguments.begin(), arguments.end(), "--");
+  for (auto argument = arguments.begin(); argument != options_end; ++argument) {
+    if (!argument->starts_with('-') || argument->size() < 2) continue;
+    const std::string name = argument->substr(0, argument->find('='));
+    if (std::find(known.begin(), known.end(), name) != known.end()) continue;
+    if (name == "--html") return "the option '--html' is not yet supported";
+    const auto close = nearest(name, known);
+    return fmt::format("unknown option '{}'{}", excerpt(name),
+                       close ? fmt::format(", did you mean '{}'?", *close) : "");
   }
-  if (error.get_name() == "RequiredError") return "no tower file is named";
-  if (error.get_name() == "ArgumentMismatch")
-    return fmt::format("an option lacks its value ({})", error.what());
-  return error.what();
+  return "more than one tower file is named";
+}
+
+bool given_twice(const std::string& option, const std::vector<std::string>& arguments) {
+  return std::count_if(arguments.begin(), arguments.end(), [&](const std::string& argument) {
+           return argument.substr(0, argument.find('=')) == option;
+         }) > 1;
+}
+
+// CLI11 takes "--csv" for the value of a "--json" that lacks its own.
+std::optional<std::string> option_without_value(const std::vector<std::string>& arguments) {
+  const std::vector<std::string> with_value{"--json", "--csv", "--color"};
+  for (std::size_t i = 0; i + 1 < arguments.size() && arguments[i] != "--"; ++i) {
+    if (std::find(with_value.begin(), with_value.end(), arguments[i]) == with_value.end()) continue;
+    if (arguments[i + 1].starts_with('-') && arguments[i + 1] != "-") return arguments[i];
+  }
+  return std::nullopt;
+}
+
+// What is wrong, in the words of the house for the commonest slips and in those of CLI11 for others.
+std::string reason_of(const CLI::ParseError& error, const std::vector<std::string>& arguments) {
+  const std::string what = error.what();
+  if (is(error, CLI::ExitCodes::ExtrasError)) return about_extras(arguments);
+  if (is(error, CLI::ExitCodes::RequiredError)) return "no tower file is named";
+  if (is(error, CLI::ExitCodes::ArgumentMismatch)) {
+    const std::string option = what.substr(0, what.find(':'));
+    return fmt::format("the option '{}' {}", option,
+                       given_twice(option, arguments) ? "is given twice" : "lacks its value");
+  }
+  return what;
+}
+
+// Why the values of the options cannot be followed; empty where they can.
+std::string reason_against(const Command& command) {
+  if ((command.csv && command.csv->empty()) || (command.json && command.json->empty()))
+    return "a file name is empty";
+  if (command.csv && *command.csv == "-") return "--csv wants a folder, which '-' is not";
+  if (command.shapes && !command.csv && !command.json) return "--shapes goes with --json or --csv";
+  return {};
 }
 
 Parsed parse_arguments(Command command, std::vector<std::string> arguments) {
+  if (const auto option = option_without_value(arguments))
+    return usage_error(fmt::format("the option '{}' lacks its value", *option));
   CLI::App app;
   std::string colour = "auto";
   bool no_colour = false;
@@ -102,11 +145,8 @@ Parsed parse_arguments(Command command, std::vector<std::string> arguments) {
   if (colour == "never" || no_colour) command.colour = ColourChoice::never;
   if (colour != "auto" && colour != "always" && colour != "never")
     return usage_error("--color is auto, always or never");
-  if (command.csv && *command.csv == "-") return usage_error("--csv wants a folder, which '-' is not");
-  if ((command.csv && command.csv->empty()) || (command.json && command.json->empty()))
-    return usage_error("a file name is empty");
-  if (command.shapes && !command.csv && !command.json)
-    return usage_error("--shapes goes with --json or --csv");
+  const std::string reason = reason_against(command);
+  if (!reason.empty()) return usage_error(reason);
   return {command, "", "", kAllMet};
 }
 
@@ -127,6 +167,8 @@ Parsed parse_command_line(int argc, const char* const* argv) {
     command.scope = Scope::modes;
   } else if (word != "check") {
     if (auto later = known_later(word)) return *later;
+    if (word.starts_with('-'))
+      return usage_error(fmt::format("no command stands before '{}'", excerpt(word)));
     const auto close = nearest(word, {"check", "modes", "help"});
     return usage_error(fmt::format("unknown command '{}'{}", excerpt(word),
                                    close ? fmt::format(", did you mean '{}'?", *close) : ""));

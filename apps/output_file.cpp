@@ -1,5 +1,6 @@
 #include "apps/output_file.hpp"
 
+#include <algorithm>
 #include <cerrno>
 #include <cstdio>
 #include <cstdlib>
@@ -75,6 +76,10 @@ void OutputFiles::stage(const std::string& target, std::string text) {
   std::error_code error;
   const fs::file_status status = fs::status(target, error);
   if (fs::is_directory(status)) fail(target, "write", EISDIR, "name a file");
+  const fs::path place = fs::weakly_canonical(target, error);
+  if (!place.empty() && std::find(places_.begin(), places_.end(), place.string()) != places_.end())
+    throw FileError(fmt::format("{}: would be written twice; name two files", target));
+  places_.push_back(place.string());
   if (fs::exists(status) && !fs::is_regular_file(status)) {
     staged_.push_back({target, "", std::move(text)});
     return;

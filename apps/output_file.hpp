@@ -45,6 +45,7 @@ class OutputFiles {
     std::string text;
   };
   std::vector<Staged> staged_;
+  std::vector<std::string> places_;  ///< of all targets, whatever way they were named
   std::vector<std::string> made_folders_;
 };
 

@@ -169,6 +169,14 @@ Json seismic(const Analysis& a) {
   return object;
 }
 
+Json verdicts(const Analysis& a) {
+  Json list = Json::array();
+  for (const Verdict& verdict : a.verdicts) {
+    list.push_back({{"check", verdict.check}, {"met", verdict.met}, {"detail", verdict.detail}});
+  }
+  return list;
+}
+
 Json mechanisms(const Analysis& a) {
   Json list = Json::array();
   for (const Mechanism& mechanism : a.mechanisms.mechanisms) {
@@ -199,14 +207,11 @@ std::string json_report(const Analysis& a, bool shapes) {
     root["completeness"] = completeness(a.set.modes);
     if (!a.bands.empty()) root["bands"] = bands(a);
     if (a.seismic) root["seismic"] = seismic(a);
-    Json verdicts = Json::array();
-    for (const Verdict& verdict : a.verdicts) {
-      verdicts.push_back({{"check", verdict.check}, {"met", verdict.met}, {"detail", verdict.detail}});
-    }
-    root["verdicts"] = std::move(verdicts);
+    if (a.scope == Scope::check) root["verdicts"] = verdicts(a);
   }
   root["notes"] = a.notes;
-  return root.dump(2) + "\n";
+  // A file name is bytes, and JSON is UTF-8: what does not fit is replaced.
+  return root.dump(2, ' ', false, Json::error_handler_t::replace) + "\n";
 }
 
 }  // namespace swaymark

@@ -1,9 +1,11 @@
 #include "apps/run.hpp"
 
 #include <algorithm>
+#include <csignal>
 #include <cstdio>
 #include <cstdlib>
 #include <exception>
+#include <filesystem>
 #include <new>
 #include <string_view>
 #include <utility>
@@ -67,7 +69,17 @@ std::string read_other_file(const std::string& path) {
   return read_file(path == "-" ? "./-" : path, kMostBytes);
 }
 
+// Results in the place of their own input would cost the engineer the tower file.
+void require_apart(const Command& command) {
+  std::error_code ignored;
+  if (command.json && std::filesystem::equivalent(*command.json, command.tower, ignored) &&
+      std::filesystem::is_regular_file(*command.json, ignored))
+    throw FileError(
+        fmt::format("{}: is the tower file itself; name another file for the results", *command.json));
+}
+
 int run_command(const Command& command) {
+  require_apart(command);
   const std::string name = command.tower == "-" ? "standard input" : command.tower;
   const std::string bytes = read_file(command.tower, kMostBytes);
   Tower tower = read_tower(bytes, name, read_other_file);
@@ -90,6 +102,8 @@ void report_faults(const InputError& error) {
 }  // namespace
 
 int run(int argc, const char* const* argv) {
+  // A reader that goes away is then a failed write like any other, and what was staged is removed again.
+  static_cast<void>(std::signal(SIGPIPE, SIG_IGN));
   try {
     const Parsed parsed = parse_command_line(argc, argv);
     if (!parsed.error.empty()) to_standard_error(parsed.error + "\n");
