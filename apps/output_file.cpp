@@ -35,6 +35,18 @@ void write_all(File file, std::string_view text, const std::string& name) {
   if (std::fclose(file.release()) != 0) fail(name, "write", errno, cure);
 }
 
+// Where a link points in the end, whether a file is there or not.
+fs::path pointed_at(fs::path target) {
+  constexpr int most_links = 40;  // as many as the kernel follows
+  std::error_code error;
+  for (int i = 0; i < most_links && fs::is_symlink(fs::symlink_status(target, error)); ++i) {
+    const fs::path next = fs::read_symlink(target, error);
+    if (error) break;
+    target = target.parent_path() / next;
+  }
+  return target;
+}
+
 // The permissions that a new file has, which mkstemp does not give.
 mode_t common_permissions() {
   const mode_t mask = umask(0);
@@ -76,7 +88,9 @@ void OutputFiles::stage(const std::string& target, std::string text) {
   std::error_code error;
   const fs::file_status status = fs::status(target, error);
   if (fs::is_directory(status)) fail(target, "write", EISDIR, "name a file");
-  const fs::path place = fs::weakly_canonical(target, error);
+  // A link keeps pointing where it points: its target is what is replaced.
+  const fs::path real = pointed_at(target);
+  const fs::path place = fs::weakly_canonical(real, error);
   if (!place.empty() && std::find(places_.begin(), places_.end(), place.string()) != places_.end())
     throw FileError(fmt::format("{}: would be written twice; name two files", target));
   places_.push_back(place.string());
@@ -84,9 +98,6 @@ void OutputFiles::stage(const std::string& target, std::string text) {
     staged_.push_back({target, "", std::move(text)});
     return;
   }
-  // A link keeps pointing where it points: its target is what is replaced.
-  fs::path real = fs::is_symlink(fs::symlink_status(target, error)) ? fs::weakly_canonical(target, error)
-                                                                    : fs::path(target);
   std::string beside = (real.parent_path() / fmt::format(".{}.XXXXXX", real.filename().string())).string();
   const int descriptor = mkstemp(beside.data());
   if (descriptor < 0) fail(target, "write", errno, "check that the folder exists and may be written to");

@@ -22,9 +22,11 @@ std::string sha256_of(std::string_view bytes) {
 }
 
 std::string today() {
+  constexpr double end_of_calendar = 253'402'300'800.0;  // [s]: the year 10000
   std::tm calendar{};
   const char* fixed = std::getenv("SOURCE_DATE_EPOCH");
-  if (const auto seconds = read_number(fixed != nullptr ? fixed : "")) {
+  const auto seconds = read_number(fixed != nullptr ? fixed : "");
+  if (seconds && *seconds >= 0.0 && *seconds < end_of_calendar) {
     const auto time = static_cast<std::time_t>(*seconds);
     gmtime_r(&time, &calendar);
   } else {
