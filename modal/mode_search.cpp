@@ -13,10 +13,11 @@ namespace {
 constexpr Index kFirstTry = 12;
 constexpr double kRounding = 1e-9;  // a share of "100 %" is met by the sum over all modes
 
-// Modes at or below a frequency; counted a hair above it so that one exactly there belongs to them.
+// Modes at or below a frequency; counted a hair above it so that one exactly there belongs to them. Where no
+// count can be had, all modes, so that none is left out.
 Index modes_up_to(const Eigenproblem& problem, double omega) {
   const auto counted = problem.below(std::pow(omega * (1.0 + 1e-9), 2));
-  return counted ? counted->below : 0;
+  return counted ? counted->below : problem.mode_count();
 }
 
 // The fewest modes whose effective masses reach the share in every direction, or nothing.
