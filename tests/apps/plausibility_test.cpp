@@ -1,63 +1,79 @@
 #include "apps/plausibility.hpp"
 
-#include <algorithm>
+#include <catch2/catch.hpp>
 
-#include "tests/support/matchers.hpp"
-#include "tests/support/towers.hpp"
+#include "tests/apps/cases.hpp"
 
 namespace swaymark::test {
 
 namespace {
 
-std::vector<std::string> notes_for(Tower tower) {
-  return plausibility_notes(analyse(std::move(tower), {}, Scope::modes));
+// Whether a plausibility note with this phrase is given.
+bool asks(const Analysis& analysis, const std::string& phrase) {
+  for (const std::string& note : plausibility_notes(analysis)) {
+    CHECK_THAT(note, Catch::StartsWith("Plausible? "));
+    if (note.find(phrase) != std::string::npos) return true;
+  }
+  return false;
 }
 
-bool mentions(const std::vector<std::string>& notes, const std::string& words) {
-  return std::any_of(notes.begin(), notes.end(),
-                     [&](const std::string& note) { return note.find(words) != std::string::npos; });
+bool asks_with(const std::string& line, const std::string& phrase) {
+  return asks(checked(tower_with({line})), phrase);
 }
 
 }  // namespace
 
-TEST_CASE("a common tower gets no word on plausibility") { CHECK(notes_for(regular_mast({})).empty()); }
+TEST_CASE("a common tower is not asked about") { CHECK(plausibility_notes(harbour_light()).empty()); }
 
-TEST_CASE("steel of the wrong density is noted and other metals are not") {
-  Tower tower = regular_mast({});
-  tower.materials[0].density = 785.0;
-  CHECK(mentions(notes_for(tower), "modulus of steel"));
-  tower.materials[0] = {"aluminium", 70e9, 2700.0, {}, {}};
-  CHECK_FALSE(mentions(notes_for(tower), "kg/m3"));
-  tower.materials[0] = {"feather", 70e9, 27.0, {}, {}};
-  CHECK(mentions(notes_for(tower), "no metal's"));
+TEST_CASE("a density that no metal has and one that steel has not are asked about") {
+  CHECK(asks_with("materials: {steel: {E: 210 GPa, density: 78.5 kg/m3}}", "modulus of steel"));
+  CHECK(!asks_with("materials: {steel: {E: 210 GPa, density: 7850 kg/m3}}", "modulus of steel"));
+  const std::string foam = "materials: {steel: {E: 70 GPa, density: 270 kg/m3}}";
+  CHECK(asks_with(foam, "no metal's"));
+  CHECK(!asks_with("materials: {steel: {E: 70 GPa, density: 2700 kg/m3}}", "no metal's"));
 }
 
-TEST_CASE("a mass equal to that of the bars is asked about") {
-  Tower tower = regular_mast({});
-  double bars = 0.0;
-  for (const BarElement& bar : bar_elements(tower)) bars += bar.own_mass;
-  tower.node_masses[0].total = bars;
-  CHECK(mentions(notes_for(tower), "counted twice"));
-  tower.node_masses[0].total = 1.1 * bars;
-  CHECK_FALSE(mentions(notes_for(tower), "counted twice"));
+TEST_CASE("a modulus far too small for a bare number in pascal is asked about") {
+  CHECK(asks_with("materials: {steel: {E: 210, density: 7850 kg/m3}}", "E = 210 Pa"));
+  CHECK(!asks_with("materials: {steel: {E: 210 GPa, density: 7850 kg/m3}}", "a bare number"));
 }
 
-TEST_CASE("a tower that carries far more than itself and sways slowly is asked about") {
-  Tower tower = regular_mast({});
-  tower.node_masses[0].total = 4e6;
-  const auto notes = notes_for(tower);
-  CHECK(mentions(notes, "times the mass of its bars"));
-  CHECK(mentions(notes, "kg on a height of"));
-  CHECK(mentions(notes, "f1 ="));
+TEST_CASE("a band in turns a minute without the unit is asked about") {
+  CHECK(asks_with("bands: [{label: fan, speed: 990}]", "rpm"));
+  CHECK(!asks_with("bands: [{label: fan, speed: 990 rpm}]", "rpm"));
 }
 
-TEST_CASE("a bar much longer than the tower is high is named") {
-  Tower tower = bare_tower(2);
-  for (const double x : {0.0, 10.0}) fix(tower, add_node(tower, {x, 0.0, 0.0}));
-  add_node(tower, {5.0, 0.0, 1.0});
-  add_bar(tower, 0, 2);
-  add_bar(tower, 1, 2);
-  CHECK(mentions(notes_for(tower), "Bar bars-1 is"));
+TEST_CASE("a spectrum in parts of gravity without the unit is asked about") {
+  const std::string use = "seismic: {spectrum: {x: s}}";
+  CHECK(asks(checked(lone_mass({"spectra: {s: {points: [[0, 0.08], [1, 0.1]]}}", use})), "not g"));
+  CHECK(!asks(checked(lone_mass({"spectra: {s: {points: [[0, 0.08 g], [1, 0.1 g]]}}", use})), "not g"));
+}
+
+TEST_CASE("a bar much longer than the tower is high is asked about") {
+  CHECK(asks_with("nodes: {a: [0, 0], b: [2, 0], c: [1000, 1]}", "Bar g-1 is"));
+  CHECK(!asks_with("nodes: {a: [0, 0], b: [2, 0], c: [1, 1]}", "Bar "));
+}
+
+TEST_CASE("a carried mass equal to that of the bars is asked about") {
+  // 2 sqrt(2) m of 10 cm2 of steel weigh 22.20 kg.
+  CHECK(asks_with("masses: [{nodes: [c], mass: 22.2 kg, label: self weight}]", "'self weight'"));
+  CHECK(!asks_with("masses: [{nodes: [c], mass: 20 kg, label: lantern}]", "counted twice"));
+}
+
+TEST_CASE("a tower that carries very many times its own mass is asked about") {
+  CHECK(asks_with("masses: [{nodes: [c], mass: 2220 kg}]", "times the mass of its bars"));
+  CHECK(!asks_with("masses: [{nodes: [c], mass: 222 kg}]", "times the mass of its bars"));
+}
+
+TEST_CASE("a frequency far from what towers of that height have is asked about") {
+  CHECK(asks_with("masses: [{nodes: [c], mass: 20 kg}]", "lattice towers"));  // some 400 Hz at 1 m of height
+  CHECK(!asks(harbour_light(), "lattice towers"));
+}
+
+TEST_CASE("a rod is not asked about heights") {
+  for (const std::string& note : plausibility_notes(checked(shaken_rod(1)))) {
+    CHECK(note.find("high") == std::string::npos);
+  }
 }
 
 }  // namespace swaymark::test

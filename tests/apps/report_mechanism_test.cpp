@@ -1,0 +1,53 @@
+#include "apps/report_mechanism.hpp"
+
+#include <catch2/catch.hpp>
+#include <fmt/format.h>
+
+#include "tests/apps/cases.hpp"
+
+namespace swaymark::test {
+
+TEST_CASE("a mechanism is told with its file its node its direction and a cure") {
+  const std::string text = mechanism_text(checked(swinging_bar()));
+  CHECK_THAT(text, Catch::StartsWith("tower.yaml: ") && Catch::Contains("in 1 way;"));
+  CHECK(has_line(text, {"node c: "}));
+  // Square to its only bar, which rises at 45 degrees: x and z equal and opposite.
+  CHECK((has_line(text, {"x 0.707", "z -0.707"}) || has_line(text, {"x -0.707", "z 0.707"}) ||
+         has_line(text, {"x 1.000", "z -1.000"}) || has_line(text, {"x -1.000", "z 1.000"})));
+  CHECK(has_line(text, {"cure: ", "node 'c'"}));
+}
+
+TEST_CASE("bars and supports are counted against the degrees of freedom") {
+  CHECK(has_line(mechanism_text(checked(swinging_bar())),
+                 {"1 bars + 4 fixed and 0 sprung degrees of freedom against 6 in all"}));
+}
+
+TEST_CASE("a long list of mechanisms is cut and counted") {
+  // A star of bars from one held node: every tip swings.
+  Tower tower = bare_tower(2);
+  fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
+  for (int i = 0; i < 25; ++i)
+    add_bar(tower, 0, add_node(tower, {std::cos(0.1 * i), 0.0, std::sin(0.1 * i)}));
+  const Analysis analysis = checked(tower);
+  REQUIRE(analysis.mechanisms.mechanisms.size() == 25);
+  const std::string text = mechanism_text(analysis);
+  CHECK_THAT(text, Catch::Contains("in 25 ways;") && Catch::Contains("... and 5 more"));
+  CHECK(lines_of(text).size() < 120);
+}
+
+TEST_CASE("a mechanism of many nodes shows the first and counts the others") {
+  // A mast on feet that hold nothing sideways moves as a whole.
+  Tower tower = regular_mast({});
+  for (Support& support : tower.supports) support.fixed = {false, false, true};
+  const std::string text = mechanism_text(checked(tower));
+  CHECK_THAT(text, Catch::Contains("the whole tower moves") && Catch::Contains("more nodes"));
+}
+
+TEST_CASE("no line on mechanisms is wider than a page or has a minus sign before zero") {
+  for (const std::string& line : lines_of(mechanism_text(checked(swinging_bar())))) {
+    CHECK(line.size() <= 100);
+    CHECK(line.find("-0.000") == std::string::npos);
+  }
+}
+
+}  // namespace swaymark::test
