@@ -46,6 +46,10 @@ std::string mechanism_text(const Analysis& analysis) {
       out += fmt::format("       and {} more nodes\n", mechanism.motion.size() - most_nodes);
     for (const std::string& cure : mechanism.cures) out += wrapped(cure, "     cure: ", 100);
   }
+  for (const LooseNodes& loose : analysis.tower.lattice_leaves_loose) {
+    out += wrapped(loose.what, "  the pattern: ", 100);
+    for (const std::string& cure : loose.cures) out += wrapped(cure, "     cure: ", 100);
+  }
   if (list.size() > most_mechanisms) out += fmt::format("  ... and {} more\n", list.size() - most_mechanisms);
   return out;
 }

@@ -16,8 +16,10 @@ namespace {
 
 // A node whose bars leave a direction open to within this much of their unit stiffness; a slope of 1e-5.
 constexpr double kLocalOpen = 1e-10;
-// Pivots below this share of their diagonal make the whole suspect; a tower of 2500 panels stays above it.
-constexpr double kSuspectPivot = 1e-11;
+// Pivots below this share of their diagonal make the whole suspect. Rounding lifts the pivot of a mechanism,
+// by far more than its own size where the pivots before it are small, so that this only spares stiff towers
+// the search.
+constexpr double kSuspectPivot = 1e-6;
 // Strain energy of a unit motion at unit stiffness. Rounding leaves 1e-30; the softest sound tower 1e-14.
 constexpr double kNoStrain = 1e-22;
 constexpr double kMoves = 1e-6;    // of the largest component: below it a node stands still
@@ -179,6 +181,9 @@ Eigen::MatrixXd strainless_motions(const SparseMatrix& stiffness, const SparseMa
     const Eigen::VectorXd motion = basis * solver.eigenvectors().col(j);
     if ((elongation * motion).squaredNorm() < kNoStrain) ++strainless;
   }
+  // A full block may have left some out.
+  if (strainless == block && block < n && suspects < kMostGlobal)
+    return strainless_motions(stiffness, elongation, std::min(2 * suspects + 8, kMostGlobal));
   return basis * solver.eigenvectors().leftCols(strainless);
 }
 

@@ -107,8 +107,23 @@ std::string_view trimmed(std::string_view text) {
 
 struct Parts {
   double number = 0.0;
-  std::string_view unit;
+  std::string unit;
 };
+
+// Typed exponents as digits: cm² is cm2.
+std::string plain_exponents(std::string_view unit) {
+  std::string plain;
+  for (std::size_t i = 0; i < unit.size(); ++i) {
+    const std::string_view here = unit.substr(i, 2);
+    if (here == "\u00b2" || here == "\u00b3") {
+      plain += here == "\u00b2" ? '2' : '3';
+      ++i;
+    } else {
+      plain += unit[i];
+    }
+  }
+  return plain;
+}
 
 std::optional<Parts> split(std::string_view text) {
   std::string_view body = trimmed(text);
@@ -122,7 +137,7 @@ std::optional<Parts> split(std::string_view text) {
   Parts parts;
   const auto [end, error] = std::from_chars(body.data(), body.data() + body.size(), parts.number);
   if (error != std::errc{} || !std::isfinite(parts.number)) return std::nullopt;
-  parts.unit = trimmed(body.substr(static_cast<std::size_t>(end - body.data())));
+  parts.unit = plain_exponents(trimmed(body.substr(static_cast<std::size_t>(end - body.data()))));
   return parts;
 }
 
@@ -197,6 +212,8 @@ std::variant<double, Message> read_quantity(std::string_view text, Quantity want
   if (!parts) return wording::not_a_number(text, row.name, row.examples);
   if (parts->unit.empty()) return parts->number;
   if (parts->unit.starts_with(',')) return wording::decimal_comma(text);
+  if (parts->unit == "ton" || parts->unit == "tons")
+    return wording::ambiguous_unit(parts->unit, "t (1000 kg), short_ton (907 kg) or long_ton (1016 kg)");
   const UnitRow* other = nullptr;
   for (const UnitRow& known : kUnits) {
     if (known.unit != parts->unit) continue;

@@ -118,11 +118,21 @@ Message number_out_of_range(std::string_view text) {
 Message unknown_unit(std::string_view unit, std::string_view quantity, std::string_view units) {
   return {fmt::format("'{}' is no unit for {}", excerpt(unit), quantity), fmt::format("use {}", units)};
 }
+Message ambiguous_unit(std::string_view unit, std::string_view choices) {
+  return {fmt::format("'{}' means different things at different places", unit),
+          fmt::format("write {}", choices)};
+}
+
 Message wrong_dimension(std::string_view text, std::string_view wanted, std::string_view units,
                         std::string_view came) {
   std::string cure = fmt::format("use {}", units);
-  if (wanted.find("mass") != std::string_view::npos && came.find("force") != std::string_view::npos) {
-    cure = fmt::format("a mass is never a weight: divide by {} m/s2 and write kg", "9.80665");
+  const auto mentions = [](std::string_view words, std::string_view word) {
+    return words.find(word) != std::string_view::npos;
+  };
+  // A force per length has the dimension of a stiffness.
+  if (mentions(wanted, "mass") && (mentions(came, "force") || mentions(came, "stiffness"))) {
+    cure = fmt::format("a mass is never a weight: divide by 9.80665 m/s2 and write {}",
+                       mentions(wanted, "per length") ? "kg/m" : "kg");
   }
   return {fmt::format("{} was wanted, got '{}', which is {}", wanted, excerpt(text),
                       came.empty() ? "something else" : came),

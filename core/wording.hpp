@@ -46,6 +46,7 @@ namespace swaymark::wording {
 [[nodiscard]] Message decimal_comma(std::string_view text);
 [[nodiscard]] Message number_out_of_range(std::string_view text);
 [[nodiscard]] Message unknown_unit(std::string_view unit, std::string_view quantity, std::string_view units);
+[[nodiscard]] Message ambiguous_unit(std::string_view unit, std::string_view choices);
 [[nodiscard]] Message wrong_dimension(std::string_view text, std::string_view wanted, std::string_view units,
                                       std::string_view came);
 [[nodiscard]] Message no_unit_database(std::string_view unit, std::string_view units);

@@ -180,6 +180,21 @@ class TreeBuilder : public YAML::EventHandler {
   YamlNode root_;
 };
 
+// Where more brackets stand open than any document has, counted without regard to quotes and comments. The
+// parser itself would first read ahead to the end of the file, with a cost for every bracket.
+std::optional<Place> too_many_open(std::string_view text, std::size_t limit) {
+  std::size_t open = 0;
+  Place place{1, 0};
+  for (const char c : text) {
+    ++place.column;
+    if (c == '\n') place = {place.line + 1, 0};
+    if (c == '[' || c == '{') ++open;
+    if ((c == ']' || c == '}') && open > 0) --open;
+    if (open > limit) return place;
+  }
+  return std::nullopt;
+}
+
 // Keys must be scalars and stand once in their map.
 void check_keys(const YamlNode& node, FaultList& faults) {
   if (node.kind == YamlNode::Kind::map) {
@@ -221,6 +236,9 @@ YamlNode parse_yaml(std::string_view text, const std::string& file, FaultList& f
   if (text.size() > limits.bytes) refuse({}, wording::file_too_long(text.size(), limits.bytes));
   if (text.starts_with("\xEF\xBB\xBF")) text.remove_prefix(3);  // a byte-order mark says nothing in UTF-8
   if (const auto place = first_invalid_character(text)) refuse(*place, wording::invalid_character());
+
+  if (const auto place = too_many_open(text, limits.open_brackets))
+    refuse(*place, wording::too_deep(limits.depth));
 
   TextBuffer buffer(text);
   std::istream stream(&buffer);

@@ -27,6 +27,8 @@ struct YamlLimits {
   std::size_t nodes = 3'000'000;  ///< values written out
   std::size_t aliased = 100'000;  ///< values that all aliases together stand for
   std::size_t depth = 24;
+  std::size_t open_brackets =
+      10'000;  ///< unclosed at one place, looked at before the parser reads that far ahead
 };
 
 /// Parses one YAML document.

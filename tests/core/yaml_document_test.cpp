@@ -245,4 +245,16 @@ TEST_CASE("what is no YAML is refused with a place") {
   CHECK_THAT(refusal_of("}"), Catch::StartsWith("1:1 "));
 }
 
+TEST_CASE("millions of opened brackets are refused before the parser reads them") {
+  for (const char* bracket : {"[", "{"}) {
+    std::string text;
+    for (int i = 0; i < 8'000'000; ++i) text += bracket;
+    CHECK(is_quick([&] { CHECK_THAT(refusal_of(text), Catch::StartsWith("1:10001 ")); }));
+  }
+}
+
+TEST_CASE("brackets in a comment do not count as nesting as long as they are few") {
+  CHECK(refusal_of("# [[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[[\na: 1\n").empty());
+}
+
 }  // namespace swaymark::test

@@ -176,4 +176,21 @@ TEST_CASE("a spectrum keeps its name and its statement") {
   CHECK(spectrum.statement().points == four_points().points);
 }
 
+TEST_CASE("a corrected table of the elastic spectrum of EN 1998-1 follows its formula with eta") {
+  // EN 1998-1:2004, 3.2.2.2, type 1, ground A (read in a public reprint): Se = ag S [1 + T/TB (2.5 eta - 1)]
+  // up to TB.
+  SpectrumStatement table;
+  table.name = "ground A";
+  table.damping = 0.05;
+  table.damping_correction = true;
+  table.points = {{0.0, 2.0}, {0.15, 5.0}, {0.4, 5.0}};
+  for (const double damping : {0.02, 0.05, 0.10}) {
+    const double eta = damping_correction(damping);
+    for (const double period : {0.001, 0.05, 0.14}) {
+      const double published = 2.0 * (1.0 + period / 0.15 * (2.5 * eta - 1.0));
+      CHECK_THAT(DesignSpectrum(table, 1.0).acceleration(period, damping), is_near(published, kRoundoff));
+    }
+  }
+}
+
 }  // namespace swaymark::test
