@@ -11,7 +11,7 @@ namespace swaymark {
 
 namespace {
 
-constexpr Index kSmall = 80;       // below it the dense solver is the faster one
+constexpr Index kSmall = 80;        // below it the dense solver is the faster one
 constexpr Index kMostDense = 4000;  // above it dense takes minutes
 constexpr double kDistinct = 1e-5;  // relative gap of omega^2 at which a set of modes may end
 constexpr int kMostContinuations = 12;
