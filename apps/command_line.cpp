@@ -108,7 +108,7 @@ std::optional<std::string> option_without_value(const std::vector<std::string>& 
 
 // What is wrong, in the words of the house for the commonest slips and in those of CLI11 for others.
 std::string reason_of(const CLI::ParseError& error, const std::vector<std::string>& arguments) {
-  const std::string what = error.what();
+  std::string what = error.what();
   if (is(error, CLI::ExitCodes::ExtrasError)) return about_extras(arguments);
   if (is(error, CLI::ExitCodes::RequiredError)) return "no tower file is named";
   if (is(error, CLI::ExitCodes::ArgumentMismatch)) {

@@ -19,7 +19,8 @@ namespace fs = std::filesystem;
 namespace {
 
 struct CloseFile {
-  void operator()(std::FILE* file) const { std::fclose(file); }
+  // The unique_ptr is the owner that the rule wants to see.
+  void operator()(std::FILE* file) const { std::fclose(file); }  // NOLINT(cppcoreguidelines-owning-memory)
 };
 using File = std::unique_ptr<std::FILE, CloseFile>;
 
@@ -80,8 +81,7 @@ OutputFiles::~OutputFiles() {
     if (!staged.beside.empty()) fs::remove(staged.beside, ignored);
   }
   // Only if empty: what another program put there is not ours to remove.
-  for (auto folder = made_folders_.rbegin(); folder != made_folders_.rend(); ++folder)
-    fs::remove(*folder, ignored);
+  for (; !made_folders_.empty(); made_folders_.pop_back()) fs::remove(made_folders_.back(), ignored);
 }
 
 void OutputFiles::stage(const std::string& target, std::string text) {

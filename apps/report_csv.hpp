@@ -12,8 +12,9 @@ struct NamedText {
   std::string text;
 };
 
-/// The results as CSV files (RFC 4180, comma, '.', SI, units in brackets in the header): modes, ledger, and
-/// where they apply bands, ordinates, bars, nodes, reactions, verdicts, and shapes where asked for.
+/// The results as CSV files (quoted as in RFC 4180, lines end with a line feed, comma, '.', SI, units in
+/// brackets in the header): modes, ledger, and where they apply bands, ordinates, base, bars, nodes,
+/// reactions, verdicts, and shapes where asked for.
 [[nodiscard]] std::vector<NamedText> csv_report(const Analysis& analysis, bool shapes);
 
 }  // namespace swaymark
