@@ -32,7 +32,7 @@ TEST_CASE("dense and shift and invert modes agree with another solver on random 
   for (const int dimensions : {1, 2, 3}) {
     for (const int unknowns : {10, 30, 60, 120, 180, 300}) {
       INFO(dimensions << " dimensions, " << unknowns << " unknowns");
-      const Model model = model_of(braced_truss(dimensions, unknowns / dimensions, random));
+      const Model model = model_of(random_truss(dimensions, unknowns / dimensions, random));
       const Oracle oracle = oracle_of(model);
       const Eigenproblem problem = model.problem();
       // Lanczos needs room for the four more pairs that are sought.
@@ -53,7 +53,7 @@ TEST_CASE("all modes of a truss can be had in every mass scheme") {
   std::mt19937 random(32);
   for (const MassScheme scheme : {MassScheme::consistent, MassScheme::lumped, MassScheme::averaged}) {
     for (const int nodes : {4, 40, 70}) {
-      Tower tower = braced_truss(3, nodes, random);
+      Tower tower = random_truss(3, nodes, random);
       tower.mass_scheme = scheme;
       const Model model = model_of(tower);
       const Eigenproblem problem = model.problem();
@@ -107,7 +107,7 @@ TEST_CASE("a stiffness that is not positive definite is said by the status") {
 
 TEST_CASE("a certificate counts the modes below a frequency that lies between two modes") {
   std::mt19937 random(33);
-  const Model model = model_of(braced_truss(3, 60, random));
+  const Model model = model_of(random_truss(3, 60, random));
   const Oracle oracle = oracle_of(model);
   const Eigenproblem problem = model.problem();
   for (Index count = 1; count <= 20; ++count) {
@@ -122,7 +122,7 @@ TEST_CASE("a certificate counts the modes below a frequency that lies between tw
 
 TEST_CASE("the first of given modes are certified afresh") {
   std::mt19937 random(34);
-  const Model model = model_of(braced_truss(2, 30, random));
+  const Model model = model_of(random_truss(2, 30, random));
   const Eigenproblem problem = model.problem();
   const Modes all = problem.lowest(20);
   for (Index count = 1; count <= all.count(); ++count) {
@@ -148,7 +148,7 @@ TEST_CASE("a set that is cut within a repeated pair is certified past its copy")
 
 TEST_CASE("a set of modes with a hole in it is not complete") {
   std::mt19937 random(35);
-  const Model model = model_of(braced_truss(3, 15, random));
+  const Model model = model_of(random_truss(3, 15, random));
   const Eigenproblem problem = model.problem();
   const Modes all = problem.lowest(10);
   Modes holed = all;
@@ -160,7 +160,7 @@ TEST_CASE("a set of modes with a hole in it is not complete") {
 
 TEST_CASE("modes below a frequency are as many as another solver has") {
   std::mt19937 random(36);
-  const Model model = model_of(braced_truss(3, 15, random));
+  const Model model = model_of(random_truss(3, 15, random));
   const Oracle oracle = oracle_of(model);
   const Eigenproblem problem = model.problem();
   for (Index j = 1; j < oracle.omega.size(); ++j) {

@@ -12,7 +12,7 @@ SparseMatrix sparse(const Eigen::MatrixXd& dense) { return dense.sparseView(); }
 
 TEST_CASE("a factorisation solves for many right-hand sides at once") {
   std::mt19937 random(1);
-  const Model model = model_of(braced_truss(3, 20, random));
+  const Model model = model_of(random_truss(3, 20, random));
   const Factorisation factor(model.stiffness());
   REQUIRE(factor.usable());
   CHECK(factor.size() == 60);
@@ -22,7 +22,7 @@ TEST_CASE("a factorisation solves for many right-hand sides at once") {
 
 TEST_CASE("forward and backward substitution split the inverse of the stiffness in two") {
   std::mt19937 random(2);
-  const Model model = model_of(braced_truss(2, 15, random));
+  const Model model = model_of(random_truss(2, 15, random));
   const Factorisation factor(model.stiffness());
   const Index n = factor.size();
   Eigen::MatrixXd inverse(n, n);

@@ -35,7 +35,7 @@ double share(const ModeSet& set, Index direction, Index modes) {
 
 Model irregular() {
   std::mt19937 random(61);
-  return model_of(braced_truss(3, 30, random));
+  return model_of(random_truss(3, 30, random));
 }
 
 // Masses on springs of their own side by side: frequencies at will.

@@ -74,38 +74,6 @@ inline void check_same_modes(const Modes& modes, const Oracle& oracle, const Spa
   }
 }
 
-/// A truss of random nodes, each tied to one more earlier node than it has axes, so that it is stable.
-inline Tower braced_truss(int dimensions, int free_nodes, std::mt19937& random) {
-  std::uniform_real_distribution<double> unit(0.0, 1.0);
-  Tower tower = bare_tower(dimensions);
-  tower.groups.clear();
-  tower.sections.clear();
-  const auto ties = static_cast<std::size_t>(dimensions) + 1;
-  for (std::size_t i = 0; i < ties + static_cast<std::size_t>(free_nodes); ++i) {
-    Eigen::Vector3d position = Eigen::Vector3d::Zero();
-    for (const Axis axis : tower.axes()) position[index_of(axis)] = 10.0 * unit(random);
-    const std::size_t node = add_node(tower, position);
-    if (i < ties) {
-      fix(tower, node);
-      continue;
-    }
-    Section section;
-    section.name = "s" + std::to_string(i);
-    section.area = 1e-4 + 4e-3 * unit(random);
-    tower.sections.push_back(section);
-    tower.groups.push_back({"g" + std::to_string(i), tower.sections.size() - 1, 0, {}});
-    std::vector<std::size_t> earlier;
-    while (earlier.size() < ties) {
-      const std::size_t other = std::uniform_int_distribution<std::size_t>(0, node - 1)(random);
-      if (std::find(earlier.begin(), earlier.end(), other) != earlier.end()) continue;
-      earlier.push_back(other);
-      add_bar(tower, other, node);
-    }
-    if (unit(random) < 0.3) carry(tower, node, 500.0 * unit(random));
-  }
-  return tower;
-}
-
 /// A mast without a mass of its own: only the top nodes have inertia.
 inline Tower massless_mast(int legs, int panels) {
   Mast mast;

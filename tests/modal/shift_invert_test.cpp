@@ -12,7 +12,7 @@ Eigen::MatrixXd nothing_known(const Model& model) { return Eigen::MatrixXd(model
 
 TEST_CASE("shift and invert finds the pairs that the dense solver finds") {
   std::mt19937 random(4);
-  const Model model = model_of(braced_truss(3, 30, random));
+  const Model model = model_of(random_truss(3, 30, random));
   const Factorisation factor(model.stiffness());
   const ReciprocalPairs dense = solve_dense(factor, model.mass(), 10);
   const ReciprocalPairs lanczos = solve_shift_invert(factor, model.mass(), 10, nothing_known(model));
@@ -24,7 +24,7 @@ TEST_CASE("shift and invert finds the pairs that the dense solver finds") {
 
 TEST_CASE("shift and invert looks square to what is known") {
   std::mt19937 random(5);
-  const Model model = model_of(braced_truss(2, 40, random));
+  const Model model = model_of(random_truss(2, 40, random));
   const Factorisation factor(model.stiffness());
   const ReciprocalPairs dense = solve_dense(factor, model.mass(), 9);
   // Known: the first, the third and the fifth pair; the next four are 2, 4, 6, 7.
@@ -39,7 +39,7 @@ TEST_CASE("shift and invert looks square to what is known") {
 
 TEST_CASE("a shift and invert run can be repeated to the last digit") {
   std::mt19937 random(6);
-  const Model model = model_of(braced_truss(3, 25, random));
+  const Model model = model_of(random_truss(3, 25, random));
   const Factorisation factor(model.stiffness());
   const ReciprocalPairs first = solve_shift_invert(factor, model.mass(), 6, nothing_known(model));
   const ReciprocalPairs second = solve_shift_invert(factor, model.mass(), 6, nothing_known(model));

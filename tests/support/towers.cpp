@@ -1,5 +1,6 @@
 #include "tests/support/towers.hpp"
 
+#include <algorithm>
 #include <cmath>
 #include <numbers>
 
@@ -107,23 +108,23 @@ Tower random_truss(int dimensions, int free_nodes, std::mt19937& random) {
   Tower tower = bare_tower(dimensions);
   tower.groups.clear();
   tower.sections.clear();
-  const auto place = [&]() {
+  const auto ties = static_cast<std::size_t>(dimensions) + 1;
+  for (std::size_t i = 0; i < ties + static_cast<std::size_t>(free_nodes); ++i) {
     Eigen::Vector3d position = Eigen::Vector3d::Zero();
     for (const Axis axis : tower.axes()) position[index_of(axis)] = 10.0 * unit(random);
-    return position;
-  };
-  const int anchors = dimensions + 1;
-  for (int i = 0; i < anchors; ++i) fix(tower, add_node(tower, place()));
-  for (int i = 0; i < free_nodes; ++i) {
-    const std::size_t node = add_node(tower, place());
+    const std::size_t node = add_node(tower, position);
+    if (i < ties) {
+      fix(tower, node);
+      continue;
+    }
     tower.sections.push_back(section_of("s" + std::to_string(i), 1e-4 + 4e-3 * unit(random)));
     tower.groups.push_back({"g" + std::to_string(i), tower.sections.size() - 1, 0, {}});
-    // Bars to any `dimensions + 1` earlier nodes hold the new one: random directions do not lie in a plane.
-    for (std::size_t k = 1; k <= static_cast<std::size_t>(anchors); ++k) {
-      const std::size_t step = std::uniform_int_distribution<std::size_t>(
-          0, (node - 1) / static_cast<std::size_t>(anchors))(random);
-      const std::size_t first = (k - 1) + step * static_cast<std::size_t>(anchors);
-      if (first < node) add_bar(tower, first, node);
+    std::vector<std::size_t> earlier;
+    while (earlier.size() < ties) {
+      const std::size_t other = std::uniform_int_distribution<std::size_t>(0, node - 1)(random);
+      if (std::find(earlier.begin(), earlier.end(), other) != earlier.end()) continue;
+      earlier.push_back(other);
+      add_bar(tower, other, node);
     }
     if (unit(random) < 0.3) carry(tower, node, 500.0 * unit(random));
   }

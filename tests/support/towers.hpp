@@ -36,7 +36,8 @@ struct Mast {
 };
 [[nodiscard]] Tower regular_mast(const Mast& mast);
 
-/// A stable truss with random nodes, areas and carried masses: each free node is tied to enough earlier ones.
+/// A truss of random nodes, areas and carried masses; each free node is tied to one more earlier node than it
+/// has axes, so that it is stable.
 [[nodiscard]] Tower random_truss(int dimensions, int free_nodes, std::mt19937& random);
 
 }  // namespace swaymark::test
