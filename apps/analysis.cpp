@@ -106,6 +106,26 @@ void describe_modes(Analysis& analysis) {
   }
 }
 
+// Figures beyond the range of numbers must not pass as results.
+void require_finite(const Analysis& analysis) {
+  const Modes& modes = analysis.set.modes;
+  bool finite = modes.omega.allFinite() && modes.shapes.allFinite() && modes.residual.allFinite() &&
+                analysis.set.participation.allFinite() && analysis.set.moving.allFinite() &&
+                (modes.omega.array() > 0.0).all();
+  if (analysis.seismic) {
+    const SeismicResult& s = *analysis.seismic;
+    finite = finite && s.bar_gravity.allFinite() && s.reaction_gravity.allFinite() &&
+             s.bar_force.allFinite() && s.displacement.allFinite() && s.reaction.allFinite();
+    for (const DirectionResult& d : s.directions) {
+      finite = finite && d.acceleration.allFinite() && d.modal_base_shear.allFinite() &&
+               std::isfinite(d.base_shear) && std::isfinite(d.overturning_moment.value_or(0.0));
+    }
+  }
+  if (!finite)
+    throw ComputationError({"results are beyond the range of numbers",
+                            "look for values that are larger or smaller than any structure's"});
+}
+
 }  // namespace
 
 std::vector<Index> Analysis::excited() const {
@@ -167,6 +187,7 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
           seismic_analysis(analysis.tower, analysis.assembly, problem, analysis.set, analysis.damping);
     }
   }
+  require_finite(analysis);
   analysis.verdicts = verdicts_of(analysis);
   analysis.notes = notes_of(analysis);
   return analysis;

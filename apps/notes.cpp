@@ -43,23 +43,28 @@ void about_modes(const Analysis& analysis, Notes& notes) {
   const Tower& tower = analysis.tower;
   const auto count = analysis.mode_count();
   const bool only_count = tower.modes.count && !tower.modes.up_to && !tower.modes.mass_share;
+  const auto wanted = count - set.copies_added;
   if (tower.modes.count && *tower.modes.count > set.available) {
     notes.push_back(fmt::format(
         "{} modes are asked for; the tower has {}, one for each free degree of freedom with mass.",
         *tower.modes.count, set.available));
-  } else if (only_count && count > *tower.modes.count) {
+  } else if (only_count && wanted > *tower.modes.count) {
     notes.push_back(fmt::format("{} modes are kept instead of {}: the highest band reaches up to mode {}.",
-                                count, *tower.modes.count, count));
+                                wanted, *tower.modes.count, wanted));
   }
-  if (set.cut_repeated) {
-    notes.push_back(fmt::format(
-        "Mode {} is one of a repeated pair whose other half was not asked for; ask for one mode more.",
-        count));
+  if (set.copies_added > 0 && tower.modes.count) {
+    notes.push_back(
+        fmt::format("{} kept besides: {} the frequency of mode {}, and half of a repeated mode says nothing.",
+                    set.copies_added == 1 ? "1 mode is" : fmt::format("{} modes are", set.copies_added),
+                    set.copies_added == 1 ? "it has" : "they have", wanted));
   }
   const auto massless = analysis.assembly.mass.rows() - set.available;
   if (massless > 0) {
-    notes.push_back(fmt::format(
-        "{} free degrees of freedom have no mass: they add no mode and follow statically.", massless));
+    notes.push_back(fmt::format("{} no mass: {} and follow{} statically.",
+                                massless == 1 ? "1 free degree of freedom has"
+                                              : fmt::format("{} free degrees of freedom have", massless),
+                                massless == 1 ? "it adds no mode" : "they add no mode",
+                                massless == 1 ? "s" : ""));
   }
   if (tower.damping.size() > 1 && count > static_cast<Index>(tower.damping.size())) {
     notes.push_back(
@@ -70,9 +75,14 @@ void about_modes(const Analysis& analysis, Notes& notes) {
 
 void about_bands(const Analysis& analysis, Notes& notes) {
   for (std::size_t b = 0; b < analysis.bands.size(); ++b) {
+    const BandStatement& band = analysis.tower.bands[b];
+    if (band.from == band.to && band.margin == 0.0) {
+      notes.push_back(
+          fmt::format("Band {} has no width: only an exact hit would count. Give a spread or a margin.",
+                      band_name(band)));
+    }
     const auto& slight = analysis.bands[b].slight;
     if (slight.empty()) continue;
-    const BandStatement& band = analysis.tower.bands[b];
     const std::string direction = band.direction == BandDirection::any
                                       ? "in any one direction"
                                       : fmt::format("in direction {}", name_of(band.direction));
@@ -87,6 +97,11 @@ void about_bands(const Analysis& analysis, Notes& notes) {
 
 void about_spectra(const Analysis& analysis, Notes& notes) {
   for (const DirectionResult& direction : analysis.seismic->directions) {
+    if (!direction.moves) {
+      notes.push_back(fmt::format("No free mass moves along {}, so that its spectrum excites nothing.",
+                                  name_of(direction.axis)));
+      continue;
+    }
     if (!direction.below_table.empty()) {
       notes.push_back(
           fmt::format("Spectrum {} along {}: the period of mode{} {} is shorter than its first point, whose "
@@ -110,17 +125,23 @@ void about_spectra(const Analysis& analysis, Notes& notes) {
     const bool differs = std::any_of(analysis.damping.begin(), analysis.damping.end(),
                                      [&](double ratio) { return spectrum.differs_in_damping(ratio); });
     if (!differs) continue;
-    const double first = analysis.damping(0);
-    const double eta = damping_correction(first) / damping_correction(*statement.damping);
+    const double least = analysis.damping.minCoeff();
+    const double most = analysis.damping.maxCoeff();
+    const auto eta = [&](double ratio) {
+      return damping_correction(ratio) / damping_correction(*statement.damping);
+    };
+    const std::string damping = most > least ? fmt::format("{:.3g} to {:.3g} %", 100.0 * least, 100.0 * most)
+                                             : fmt::format("{:.3g} %", 100.0 * least);
+    const std::string etas = most > least ? fmt::format("{:.3f} to {:.3f}", eta(least), eta(most))
+                                          : fmt::format("{:.3f}", eta(least));
     notes.push_back(
         statement.damping_correction
-            ? fmt::format("Spectrum {} is drawn for {:.3g} % damping and was corrected by eta = {:.3f} for "
-                          "the {:.3g} % of mode 1.",
-                          statement.name, 100.0 * *statement.damping, eta, 100.0 * first)
-            : fmt::format(
-                  "Spectrum {} is drawn for {:.3g} % damping, the tower has {:.3g} %; the ordinates were "
-                  "used as they stand (eta would be {:.3f}: 'damping_correction: true').",
-                  statement.name, 100.0 * *statement.damping, 100.0 * first, eta));
+            ? fmt::format("Spectrum {} is drawn for {:.3g} % damping and was corrected by eta = {} for the "
+                          "{} of the modes.",
+                          statement.name, 100.0 * *statement.damping, etas, damping)
+            : fmt::format("Spectrum {} is drawn for {:.3g} % damping, the modes have {}; the ordinates "
+                          "were used as they stand (eta would be {}: 'damping_correction: true').",
+                          statement.name, 100.0 * *statement.damping, damping, etas));
   }
 }
 

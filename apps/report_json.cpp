@@ -121,7 +121,7 @@ Json directions(const SeismicResult& s) {
   for (const DirectionResult& d : s.directions) {
     Json row{{"spectrum", d.spectrum}, {"base_shear", d.base_shear}};
     if (d.overturning_moment) row["overturning_moment"] = *d.overturning_moment;
-    row["missing_mass_ratio"] = d.missing_mass_ratio;
+    if (d.moves) row["missing_mass_ratio"] = d.missing_mass_ratio;
     Json per_mode = Json::array();
     for (Index j = 0; j < d.acceleration.size(); ++j) {
       per_mode.push_back(

@@ -6,6 +6,10 @@
 
 namespace swaymark {
 
+std::string counted(Index number, std::string_view what) {
+  return fmt::format("{} {}{}", number, what, number == 1 ? "" : "s");
+}
+
 std::string mode_list(const std::vector<Index>& modes) {
   std::string text;
   for (std::size_t i = 0; i < modes.size(); ++i) {

@@ -8,6 +8,9 @@
 /// Words and figures that several report formats share.
 namespace swaymark {
 
+/// "1 mode", "3 modes"
+[[nodiscard]] std::string counted(Index number, std::string_view what);
+
 /// "1, 2 and 7"; modes counted from 1.
 [[nodiscard]] std::string mode_list(const std::vector<Index>& modes);
 

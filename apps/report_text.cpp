@@ -47,7 +47,10 @@ class TextReport {
     if (a_.scope != Scope::check) return;
     const auto failed =
         std::count_if(a_.verdicts.begin(), a_.verdicts.end(), [](const Verdict& v) { return !v.met; });
+    const auto warnings = std::count_if(a_.notes.begin(), a_.notes.end(),
+                                        [](const std::string& note) { return note.starts_with("WARNING"); });
     out_ += "\n";
+    if (warnings > 0) out_ += fmt::format("{}: see NOTES.\n", counted(warnings, "warning"));
     if (failed == 0) {
       out_ += fmt::format("All {} checks are {}.\n", a_.verdicts.size(), word(true));
       return;
@@ -121,10 +124,10 @@ class TextReport {
     out_ += "  mass: effective modal mass as a share of the moving mass of its direction; sum: running sum\n";
     const Modes& m = a_.set.modes;
     std::string words =
-        m.certificate
-            ? fmt::format("Exactly {} modes lie below {:.4g} Hz, counted by a factorisation of its own. ",
-                          m.certificate->below, m.certificate->omega / (2.0 * std::numbers::pi))
-            : std::string("The modes could not be counted. ");
+        m.certificate ? fmt::format("Exactly {} below {:.4g} Hz, counted by a factorisation of its own. ",
+                                    counted(m.certificate->below, "mode"),
+                                    m.certificate->omega / (2.0 * std::numbers::pi))
+                      : std::string("The modes could not be counted. ");
     words += fmt::format("Largest residual |K phi - w2 M phi| / |K phi|: {:.1e}.", m.residual.maxCoeff());
     out_ += wrapped(words, "  ", kTextWidth);
   }

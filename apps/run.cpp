@@ -7,8 +7,10 @@
 #include <exception>
 #include <filesystem>
 #include <new>
+#include <string>
 #include <string_view>
 #include <utility>
+#include <vector>
 
 #include <fmt/format.h>
 #include <unistd.h>
@@ -46,15 +48,47 @@ int status_of(const Analysis& analysis) {
   return all_met ? kAllMet : kNotMet;
 }
 
-void write_results(const Command& command, const Analysis& analysis) {
+// The files that a run reads. Results in the place of one of them would cost the engineer the input.
+class Inputs {
+ public:
+  /// "-" is standard input as the tower file.
+  std::string read_tower_file(const std::string& path) {
+    files_.push_back(path == "-" ? "/dev/stdin" : path);
+    return read_file(path, kMostBytes);
+  }
+  /// A file that the tower file names; "-" is a file of that name there, never standard input.
+  std::string read_other_file(const std::string& path) {
+    files_.push_back(path == "-" ? "./-" : path);
+    return read_file(files_.back(), kMostBytes);
+  }
+  /// \throws FileError if the target is one of the files read.
+  void require_apart(const std::string& target) const {
+    std::error_code ignored;
+    if (!std::filesystem::is_regular_file(target, ignored)) return;
+    for (const std::string& file : files_) {
+      if (std::filesystem::equivalent(target, file, ignored))
+        throw FileError(
+            fmt::format("{}: is an input of this run itself; name another file for the results", target));
+    }
+  }
+
+ private:
+  std::vector<std::string> files_;
+};
+
+void write_results(const Command& command, const Analysis& analysis, const Inputs& inputs) {
   OutputFiles files;
+  const auto stage = [&](const std::string& target, std::string text) {
+    inputs.require_apart(target);
+    files.stage(target, std::move(text));
+  };
   const bool json_to_output = command.json && *command.json == "-";
   const std::string json = command.json ? json_report(analysis, command.shapes) : std::string();
-  if (command.json && !json_to_output) files.stage(*command.json, json);
+  if (command.json && !json_to_output) stage(*command.json, json);
   if (command.csv && !analysis.mechanisms.any()) {
     files.stage_folder(*command.csv);
     for (NamedText& sheet : csv_report(analysis, command.shapes))
-      files.stage(*command.csv + "/" + sheet.name, std::move(sheet.text));
+      stage(*command.csv + "/" + sheet.name, std::move(sheet.text));
   }
   files.commit();
   if (json_to_output) {
@@ -64,28 +98,15 @@ void write_results(const Command& command, const Analysis& analysis) {
   }
 }
 
-// A file that the tower file names; "-" is a file of that name there, never standard input.
-std::string read_other_file(const std::string& path) {
-  return read_file(path == "-" ? "./-" : path, kMostBytes);
-}
-
-// Results in the place of their own input would cost the engineer the tower file.
-void require_apart(const Command& command) {
-  std::error_code ignored;
-  if (command.json && std::filesystem::equivalent(*command.json, command.tower, ignored) &&
-      std::filesystem::is_regular_file(*command.json, ignored))
-    throw FileError(
-        fmt::format("{}: is the tower file itself; name another file for the results", *command.json));
-}
-
 int run_command(const Command& command) {
-  require_apart(command);
+  Inputs inputs;
   const std::string name = command.tower == "-" ? "standard input" : command.tower;
-  const std::string bytes = read_file(command.tower, kMostBytes);
-  Tower tower = read_tower(bytes, name, read_other_file);
+  const std::string bytes = inputs.read_tower_file(command.tower);
+  Tower tower =
+      read_tower(bytes, name, [&](const std::string& path) { return inputs.read_other_file(path); });
   const Analysis analysis = analyse(std::move(tower), provenance_of(name, bytes), command.scope);
   if (analysis.mechanisms.any()) to_standard_error(mechanism_text(analysis));
-  write_results(command, analysis);
+  write_results(command, analysis, inputs);
   return status_of(analysis);
 }
 

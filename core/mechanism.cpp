@@ -134,7 +134,10 @@ LocalSearch local_mechanisms(const Tower& tower, const Assembly& assembly, const
   }
   SparseMatrix extended(elongation.rows() + static_cast<Index>(found.size()), elongation.cols());
   extended.setFromTriplets(springs.begin(), springs.end());
-  return {std::move(found), std::move(extended)};
+  LocalSearch result;
+  result.mechanisms = std::move(found);
+  result.elongation.swap(extended);
+  return result;
 }
 
 using Factor = Eigen::SimplicialLDLT<SparseMatrix>;

@@ -54,6 +54,7 @@ void for_each_row(std::string_view text, Visit visit) {
   const CsvTable table = parse_csv(text, faults);
   for (const auto& row : table.rows) {
     std::vector<double> numbers;
+    numbers.reserve(row.size());
     for (const CsvCell& cell : row) numbers.push_back(read_number(cell.text).value_or(0.0));
     visit(row, numbers);
   }

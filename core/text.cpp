@@ -1,6 +1,7 @@
 #include "core/text.hpp"
 
 #include <algorithm>
+#include <array>
 #include <cctype>
 #include <numeric>
 
@@ -34,25 +35,41 @@ std::size_t edit_distance(std::string_view a, std::string_view b) {
   return last[b.size()];
 }
 
-// Length of the valid UTF-8 sequence that starts at `at`, or 0 (RFC 3629: no overlong forms, no surrogates).
+// Valid UTF-8 by its first byte: how many bytes, and the range of the second one (RFC 3629: no overlong
+// forms, no surrogates).
+struct Lead {
+  unsigned char first;
+  unsigned char last;
+  std::size_t length;
+  unsigned char second_first;
+  unsigned char second_last;
+};
+constexpr std::array<Lead, 8> kLeads{{{0xC2, 0xDF, 2, 0x80, 0xBF},
+                                      {0xE0, 0xE0, 3, 0xA0, 0xBF},
+                                      {0xE1, 0xEC, 3, 0x80, 0xBF},
+                                      {0xED, 0xED, 3, 0x80, 0x9F},
+                                      {0xEE, 0xEF, 3, 0x80, 0xBF},
+                                      {0xF0, 0xF0, 4, 0x90, 0xBF},
+                                      {0xF1, 0xF3, 4, 0x80, 0xBF},
+                                      {0xF4, 0xF4, 4, 0x80, 0x8F}}};
+
+bool is_text(unsigned char byte) {
+  return (byte >= 0x20 && byte < 0x7F) || byte == '\t' || byte == '\n' || byte == '\r';
+}
+
+// Length of the valid UTF-8 sequence that starts at `at`, or 0; control characters are none.
 std::size_t sequence_length(std::string_view text, std::size_t at) {
   const auto byte = [&](std::size_t i) { return static_cast<unsigned char>(i < text.size() ? text[i] : 0); };
-  const auto tail = [&](std::size_t i) { return (byte(i) & 0xC0U) == 0x80U; };
-  const unsigned char lead = byte(at);
-  if (lead < 0x80)
-    return (lead >= 0x20 && lead != 0x7F) || lead == '\t' || lead == '\n' || lead == '\r' ? 1 : 0;
-  if (lead >= 0xC2 && lead <= 0xDF) return tail(at + 1) ? 2 : 0;
-  if (lead >= 0xE0 && lead <= 0xEF) {
-    const unsigned char second = byte(at + 1);
-    if ((lead == 0xE0 && second < 0xA0) || (lead == 0xED && second > 0x9F)) return 0;
-    return tail(at + 1) && tail(at + 2) ? 3 : 0;
+  const unsigned char first = byte(at);
+  if (first < 0x80) return is_text(first) ? 1 : 0;
+  const auto lead = std::find_if(kLeads.begin(), kLeads.end(),
+                                 [&](const Lead& row) { return first >= row.first && first <= row.last; });
+  if (lead == kLeads.end()) return 0;
+  if (byte(at + 1) < lead->second_first || byte(at + 1) > lead->second_last) return 0;
+  for (std::size_t i = 2; i < lead->length; ++i) {
+    if ((byte(at + i) & 0xC0U) != 0x80U) return 0;
   }
-  if (lead >= 0xF0 && lead <= 0xF4) {
-    const unsigned char second = byte(at + 1);
-    if ((lead == 0xF0 && second < 0x90) || (lead == 0xF4 && second > 0x8F)) return 0;
-    return tail(at + 1) && tail(at + 2) && tail(at + 3) ? 4 : 0;
-  }
-  return 0;
+  return lead->length;
 }
 
 }  // namespace

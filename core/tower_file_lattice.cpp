@@ -100,6 +100,7 @@ class LatticeReader {
       constexpr std::array patterns{Bracing::x, Bracing::single, Bracing::alternating, Bracing::k,
                                     Bracing::k_down};
       std::vector<std::string> words;
+      words.reserve(patterns.size());
       for (const Bracing pattern : patterns) words.emplace_back(name_of(pattern));
       const auto choice = read_choice(*bracing, "bracing", words, faults_);
       if (choice) panel.bracing = patterns[*choice];

@@ -86,7 +86,9 @@ void read_band(const YamlNode& node, Tower& tower, NameTable& labels, FaultList&
         faults.add(node.place, wording::keys_exclude(key, "from/to", view.owner()));
     }
     static_cast<void>(view.find("speed"));
-    if (from && to && *from >= *to) {
+    if (from && to && *from == *to) {
+      faults.add(node.place, wording::band_without_width());
+    } else if (from && to && *from > *to) {
       faults.add(node.place, wording::band_reversed(*from, *to));
     } else if (from && to) {
       band.from = *from;

@@ -339,6 +339,7 @@ Message band_reversed(double from, double to) {
   return {fmt::format("the band ends at {:.6g} Hz, not above its begin at {:.6g} Hz", to, from),
           "exchange 'from' and 'to'"};
 }
+Message band_without_width() { return {"a band without width is never hit", "give 'to' above 'from'"}; }
 Message points_need_two() {
   return {"a spectrum needs two points or more", "write [[period, acceleration], ...]"};
 }

@@ -112,6 +112,7 @@ namespace swaymark::wording {
 
 // Requests.
 [[nodiscard]] Message band_reversed(double from, double to);
+[[nodiscard]] Message band_without_width();
 [[nodiscard]] Message points_need_two();
 [[nodiscard]] Message point_is_pair();
 [[nodiscard]] Message periods_must_rise(double before, double period);

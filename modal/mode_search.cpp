@@ -58,7 +58,7 @@ ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness, c
   set.moving = moving_mass(mass, drive);
   const Index most = problem.most_modes();
   // More modes than there are cannot be missing: asking for them gives all.
-  Index least = std::clamp<Index>(target.count.value_or(1), 1, set.available);
+  Index least = std::min(std::max<Index>(target.count.value_or(1), 1), set.available);
   if (target.omega_up_to) least = std::max(least, modes_up_to(problem, *target.omega_up_to));
   if (target.omega_covered) least = std::max(least, modes_up_to(problem, *target.omega_covered));
   Index tried = target.mass_share ? std::max(kFirstTry, least) : least;
@@ -77,12 +77,12 @@ ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness, c
       const auto share = modes_for_share(set.participation, set.moving, target);
       if (!share && tried < most) continue;
       set.reached = set.reached && share.has_value();
-      Index for_share = share.value_or(found.count());
-      while (splits_repeated(found.omega, for_share)) ++for_share;
-      keep = std::max(keep, for_share);
+      keep = std::max(keep, share.value_or(found.count()));
     }
     keep = std::min(keep, found.count());
-    set.cut_repeated = splits_repeated(found.omega, keep);
+    const Index met = keep;
+    while (splits_repeated(found.omega, keep)) ++keep;
+    set.copies_added = keep - met;
     set.modes = problem.first(found, keep);
     certify_up_to(problem, std::max(target.omega_up_to.value_or(0.0), target.omega_covered.value_or(0.0)),
                   set.modes);

@@ -22,11 +22,11 @@ struct ModeSet {
   Eigen::VectorXd moving;         ///< moving mass of each direction [kg]
   Index available = 0;            ///< modes the model has
   bool reached = true;            ///< false where most_modes() ended the search before the target was met
-  bool cut_repeated = false;      ///< the last mode kept has a copy that was not asked for
+  Index copies_added = 0;         ///< modes kept beyond the target because they repeat the last one
 };
 
-/// The fewest lowest modes that meet the target. A set chosen by mass share does not end within a repeated
-/// mode; one chosen by count does if it must. \param drive  b, n_free x n_directions [kg].
+/// The fewest lowest modes that meet the target. A set never ends within a repeated mode: half of a pair
+/// would depend on how the solver turned it. \param drive  b, n_free x n_directions [kg].
 [[nodiscard]] ModeSet find_modes(const Eigenproblem& problem, const SparseMatrix& stiffness,
                                  const SparseMatrix& mass, const Eigen::MatrixXd& drive,
                                  const ModeTarget& target);

@@ -15,9 +15,9 @@ double ratio_along(BandDirection direction, const Eigen::Vector3d& ratio) {
     case BandDirection::z:
       return ratio.z();
     case BandDirection::horizontal:
-      return std::max(ratio.x(), ratio.y());
+      return ratio.x() + ratio.y();
     case BandDirection::any:
-      return ratio.maxCoeff();
+      return ratio.sum();
   }
   return 0.0;
 }

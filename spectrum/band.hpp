@@ -9,7 +9,10 @@
 
 namespace swaymark {
 
-/// A mode counts for a band if it takes at least this share of the moving mass in the band's direction.
+/// A mode counts for a band if it takes at least this share of the moving mass in the band's direction. In
+/// direction `horizontal` or `any` that is the direction in which it takes most: the shares along the axes
+/// add up, as the squares of a vector's components do, so that turning the tower changes nothing (exactly
+/// where the moving masses are equal).
 inline constexpr double kCountsForBand = 0.01;
 
 enum class BandVerdict { clear, close, inside };

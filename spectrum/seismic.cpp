@@ -127,7 +127,8 @@ SeismicResult seismic_analysis(const Tower& tower, const Assembly& assembly, con
     direction.displacement = combine.of(&Responses::displacement, asked.modes);
     direction.reaction = combine.of(&Responses::reaction, asked.modes);
     const double moving = set.moving(static_cast<Index>(k));
-    if (moving > 0.0) direction.missing_mass_ratio = std::max(0.0, 1.0 - gamma.squaredNorm() / moving);
+    direction.moves = moving > 0.0;
+    if (direction.moves) direction.missing_mass_ratio = std::max(0.0, 1.0 - gamma.squaredNorm() / moving);
     if (asked.modes == ModalRule::srss && result.close_modes) {
       result.srss_against_cqc.push_back(ratio_of_rules(combine, axes[k]));
     }

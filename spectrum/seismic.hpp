@@ -20,6 +20,7 @@ struct DirectionResult {
   Eigen::VectorXd modal_base_shear;          ///< n_modes [N]
   double base_shear = 0.0;                   ///< [N]
   std::optional<double> overturning_moment;  ///< [N m]
+  bool moves = true;                         ///< false where no free mass moves along this axis
   double missing_mass_ratio = 0.0;           ///< share of the moving mass outside the modes kept
   Eigen::VectorXd bar_force;                 ///< n_bars [N], >= 0
   Eigen::VectorXd displacement;              ///< n_free [m], >= 0

@@ -51,10 +51,10 @@ TEST_CASE("modes kept for a band beyond the count asked for are told") {
   CHECK(note_with(checked(tower), phrase).empty());
 }
 
-TEST_CASE("half of a repeated pair is told") {
-  CHECK_THAT(note_with(checked(lone_mass({"modes: {count: 1}"})), "repeated pair"),
-             Catch::StartsWith("Mode 1 is one of"));
-  CHECK(note_with(checked(lone_mass({"modes: {count: 2}"})), "repeated pair").empty());
+TEST_CASE("the other half of a repeated pair is kept and told") {
+  CHECK_THAT(note_with(checked(lone_mass({"modes: {count: 1}"})), "repeated mode"),
+             Catch::StartsWith("1 mode is kept besides"));
+  CHECK(note_with(checked(lone_mass({"modes: {count: 2}"})), "repeated mode").empty());
 }
 
 TEST_CASE("degrees of freedom without mass are counted") {
@@ -107,7 +107,7 @@ TEST_CASE("a spectrum for another damping is told with eta whether it was correc
     return checked(
         lone_mass({"spectra: {flat: {" + keys + "points: [[0 s, 0.2 g], [10 s, 0.2 g]]}}", kAlongX}));
   };
-  // eta = sqrt(10 / (5 + 2)) = 1.195, EN 1998-1:2004 (3.6), published.md 2
+  // eta = sqrt(10 / (5 + 2)) = 1.195, EN 1998-1:2004 (3.6)
   CHECK_THAT(note_with(with_damping("damping: 5 %, "), "Spectrum flat is drawn for 5 %"),
              Catch::Contains("as they stand") && Catch::Contains("1.195") && Catch::Contains("2 %"));
   CHECK_THAT(note_with(with_damping("damping: 5 %, damping_correction: true, "), "Spectrum flat is drawn"),

@@ -135,7 +135,7 @@ TEST_CASE("results never take the place of the tower file") {
   const std::string tower = folder.write("tower.yaml", lone_mass());
   const Outcome outcome = run_with({"check", tower, "--json", folder.path().string() + "/./tower.yaml"});
   CHECK(outcome.status == kFileTrouble);
-  CHECK_THAT(outcome.error, Catch::Contains("is the tower file itself"));
+  CHECK_THAT(outcome.error, Catch::Contains("is an input of this run itself"));
   CHECK(bytes_of(tower) == lone_mass());
 }
 

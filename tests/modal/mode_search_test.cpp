@@ -76,7 +76,6 @@ TEST_CASE("every count of modes can be had however close the next mode lies") {
     const ModeSet set = search(model, count_of(count));
     CHECK(set.modes.status == ModesStatus::complete);
     CHECK(set.modes.count() == count);
-    CHECK_FALSE(set.cut_repeated);
   }
 }
 
@@ -115,7 +114,6 @@ TEST_CASE("both copies of a pair exactly at the frequency asked for belong to th
   const Modes all = model.problem().lowest(4);
   const ModeSet set = search(model, up_to(all.omega(0)));
   CHECK(set.modes.count() == 2);
-  CHECK_FALSE(set.cut_repeated);
 }
 
 TEST_CASE("a frequency below the first mode still gives one mode") {
@@ -184,20 +182,19 @@ TEST_CASE("a set chosen by mass share does not end within a repeated pair") {
   for (const Index direction : {0, 1}) {
     const ModeSet set = search(model, share_of(0.3, {direction}));
     CHECK(set.modes.count() == 2);
-    CHECK_FALSE(set.cut_repeated);
     CHECK_THAT(set.modes.omega(1), is_near(set.modes.omega(0), kTwoSolvers));
   }
 }
 
-TEST_CASE("a set chosen by count may end within a repeated pair and says so") {
+TEST_CASE("a set chosen by count takes the whole of a repeated pair and says so") {
   const Model model = model_of(regular_mast({}));
-  const ModeSet cut = search(model, count_of(1));
-  CHECK(cut.modes.count() == 1);
-  CHECK(cut.cut_repeated);
-  CHECK(cut.modes.usable());
+  const ModeSet half = search(model, count_of(1));
+  CHECK(half.modes.count() == 2);
+  CHECK(half.copies_added == 1);
+  CHECK(half.modes.usable());
   const ModeSet whole = search(model, count_of(2));
   CHECK(whole.modes.count() == 2);
-  CHECK_FALSE(whole.cut_repeated);
+  CHECK(whole.copies_added == 0);
 }
 
 TEST_CASE("of several conditions all hold") {

@@ -91,7 +91,7 @@ TEST_CASE("a mode counts from one percent of the moving mass on") {
     CHECK(counts.verdict == (frequency < 2.0 ? BandVerdict::close : BandVerdict::inside));
     CHECK(counts.slight.empty());
     const double less = std::nextafter(0.01, 0.0);
-    const BandResult slight = examine_band(rotor(), one, Eigen::RowVector3d(less, less, less));
+    const BandResult slight = examine_band(rotor(), one, Eigen::RowVector3d(less, 0.0, 0.0));
     CHECK(slight.verdict == BandVerdict::clear);
     CHECK(slight.slight == List{0});
     CHECK(slight.inside.empty());
@@ -136,13 +136,19 @@ TEST_CASE("a band in any direction looks at every axis and that is the default")
   CHECK(BandStatement{}.direction == BandDirection::any);
   for (Index axis = 0; axis < 3; ++axis)
     CHECK(verdict_with(BandDirection::any, Eigen::RowVector3d::Unit(axis)) == BandVerdict::inside);
-  CHECK(verdict_with(BandDirection::any, {0.009, 0.009, 0.009}) == BandVerdict::clear);
+  CHECK(verdict_with(BandDirection::any, {0.003, 0.003, 0.003}) == BandVerdict::clear);
 }
 
 TEST_CASE("verdicts of bands have the names of the results file") {
   CHECK(name_of(BandVerdict::clear) == "clear");
   CHECK(name_of(BandVerdict::close) == "close");
   CHECK(name_of(BandVerdict::inside) == "inside");
+}
+
+TEST_CASE("a mode along a diagonal counts as much as the same one along an axis") {
+  CHECK(verdict_with(BandDirection::horizontal, {0.014, 0.0, 0.0}) == BandVerdict::inside);
+  CHECK(verdict_with(BandDirection::horizontal, {0.007, 0.007, 0.0}) == BandVerdict::inside);
+  CHECK(verdict_with(BandDirection::any, {0.004, 0.004, 0.004}) == BandVerdict::inside);
 }
 
 }  // namespace swaymark::test
