@@ -62,8 +62,8 @@ class TextReport {
     }
   }
 
-  std::string word(bool met) const {
-    const std::string text = met ? "met" : "NOT MET";
+  [[nodiscard]] std::string word(bool met) const {
+    std::string text = met ? "met" : "NOT MET";
     if (!style_.colour) return text;
     return fmt::format("\x1b[{}m{}\x1b[0m", met ? "32" : "1;31", text);
   }

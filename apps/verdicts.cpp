@@ -27,7 +27,7 @@ std::string modes_in_words(const Analysis& analysis, const std::vector<Index>& m
 
 std::string nearest_words(const Analysis& analysis, const BandResult& result) {
   if (!result.nearest) return "; no mode kept counts in this direction";
-  const std::string nearest = "; nearest is " + modes_in_words(analysis, {*result.nearest});
+  std::string nearest = "; nearest is " + modes_in_words(analysis, {*result.nearest});
   if (result.clearance > 1.0) return nearest;
   return nearest + fmt::format(", {:.1f} % away", 100.0 * result.clearance);
 }

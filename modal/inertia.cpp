@@ -23,8 +23,8 @@ double largest_entry(const SparseMatrix& matrix) {
 
 std::optional<InertiaCount> count_modes_below(const SparseMatrix& stiffness, const SparseMatrix& mass,
                                               double omega_squared) {
-  double shift = omega_squared;
-  for (int attempt = 0; attempt < kMostTries; ++attempt, shift *= 1.0 + 1e-6) {
+  for (int attempt = 0; attempt < kMostTries; ++attempt) {
+    const double shift = omega_squared * std::pow(1.0 + 1e-6, attempt);
     SparseMatrix shifted = stiffness - shift * mass;
     shifted.makeCompressed();
     const Eigen::SimplicialLDLT<SparseMatrix> factor(shifted);
