@@ -45,7 +45,7 @@ double white_noise_correlation(double omega_i, double omega_j, double damping_i,
 
 }  // namespace
 
-TEST_CASE("the CQC correlation has its published values at 5 percent") {
+TEST_CASE("the CQC correlation has the values its formula gives at 5 percent") {
   // Derived from the formula; 0.4730 and 0.1656 are quoted by other texts as well.
   const std::vector<std::pair<double, double>> rows{
       {0.98, 0.9607}, {0.95, 0.7914}, {0.92, 0.5892}, {0.90, 0.4730}, {0.85, 0.2733},
@@ -56,7 +56,7 @@ TEST_CASE("the CQC correlation has its published values at 5 percent") {
   }
 }
 
-TEST_CASE("the CQC correlation has its published values at 2 percent") {
+TEST_CASE("the CQC correlation has the values its formula gives at 2 percent") {
   // Derived from the formula.
   const std::vector<std::pair<double, double>> rows{{0.98, 0.7967}, {0.95, 0.3780}, {0.92, 0.1868},
                                                     {0.90, 0.1257}, {0.85, 0.0568}, {0.80, 0.0308},
