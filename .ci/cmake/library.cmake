@@ -13,6 +13,13 @@ function(swaymark_target_settings target)
   endif()
 endfunction()
 
+# swaymark_precompile(<target> <target that has them>): shares headers precompiled once, where they are asked for.
+function(swaymark_precompile target owner)
+  if(SWAYMARK_PRECOMPILE)
+    target_precompile_headers(${target} REUSE_FROM ${owner})
+  endif()
+endfunction()
+
 # swaymark_library(<folder> SOURCES ... HEADERS ... LINKS ... PRIVATE_LINKS ...)
 # makes the target swaymark_<folder> with the name swaymark::<folder>, the same before and after installing.
 function(swaymark_library folder)
