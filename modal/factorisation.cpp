@@ -2,6 +2,10 @@
 
 namespace swaymark {
 
+Factorisation::Factorisation(const SparseMatrix& matrix) : llt_(matrix) {}
+
+Eigen::MatrixXd Factorisation::solve(const Eigen::MatrixXd& right) const { return llt_.solve(right); }
+
 Eigen::VectorXd Factorisation::forward(const Eigen::VectorXd& x) const {
   Eigen::VectorXd y = llt_.permutationP() * x;
   llt_.matrixL().solveInPlace(y);

@@ -1,5 +1,5 @@
 #include "modal/eigenproblem.hpp"
-#include "tests/modal/models.hpp"
+#include "tests/support/models.hpp"
 
 /// Structures on which eigensolvers lose modes or digits without a word.
 namespace swaymark::test {

@@ -1,6 +1,6 @@
 #include "modal/mode_search.hpp"
 
-#include "tests/modal/models.hpp"
+#include "tests/support/models.hpp"
 
 namespace swaymark::test {
 

@@ -3,7 +3,7 @@
 #include <numbers>
 
 #include "modal/participation.hpp"
-#include "tests/modal/models.hpp"
+#include "tests/support/models.hpp"
 
 namespace swaymark::test {
 

@@ -1,12 +1,10 @@
 #pragma once
 
-#include <algorithm>
 #include <cmath>
 #include <initializer_list>
 #include <numbers>
 
 #include "core/assembly.hpp"
-#include "modal/damping.hpp"
 #include "spectrum/seismic.hpp"
 #include "tests/support/matchers.hpp"
 #include "tests/support/towers.hpp"
@@ -18,32 +16,15 @@ inline constexpr double kTurn = 2.0 * std::numbers::pi;
 /// Axial stiffness of a bar of bare_tower, 1 m long [N/m].
 inline constexpr double kStiff = 210e9 * 1e-3;
 
-inline Eigen::VectorXd vector_of(std::initializer_list<double> values) {
-  Eigen::VectorXd vector(static_cast<Index>(values.size()));
-  std::copy(values.begin(), values.end(), vector.begin());
-  return vector;
-}
+[[nodiscard]] Eigen::VectorXd vector_of(std::initializer_list<double> values);
 
 /// Every drive b of the tower's axes, n_free x n_axes [kg].
-inline Eigen::MatrixXd drives(const Assembly& assembly) {
-  const auto& axes = assembly.dofs.axes();
-  Eigen::MatrixXd drive(assembly.mass.rows(), static_cast<Index>(axes.size()));
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    drive.col(static_cast<Index>(k)) = inertia_vector(assembly, rigid_translation(assembly.dofs, axes[k]));
-  }
-  return drive;
-}
+[[nodiscard]] Eigen::MatrixXd drives(const Assembly& assembly);
 
 /// A tower with the modes it asks for by number, or with all it has. Not to be copied: the problem refers to
 /// the matrices.
 struct Vibrating {
-  explicit Vibrating(const Tower& stated)
-      : tower(stated), assembly(assemble(tower)), problem(assembly.stiffness, assembly.mass) {
-    ModeTarget target;
-    target.count = tower.modes.count ? Index{*tower.modes.count} : problem.mode_count();
-    set = find_modes(problem, assembly.stiffness, assembly.mass, drives(assembly), target);
-    REQUIRE(set.modes.usable());
-  }
+  explicit Vibrating(const Tower& stated);
   Vibrating(const Vibrating&) = delete;
   Vibrating& operator=(const Vibrating&) = delete;
 
@@ -53,34 +34,17 @@ struct Vibrating {
   ModeSet set;
 };
 
-inline SeismicResult shake(const Vibrating& vibrating) {
-  const Eigen::VectorXd damping = modal_damping(vibrating.tower.damping, vibrating.set.modes.count());
-  return seismic_analysis(vibrating.tower, vibrating.assembly, vibrating.problem, vibrating.set, damping);
-}
-inline SeismicResult shake(const Tower& tower) { return shake(Vibrating(tower)); }
+[[nodiscard]] SeismicResult shake(const Vibrating& vibrating);
+[[nodiscard]] SeismicResult shake(const Tower& tower);
 
 /// Excites an axis by a spectrum of these points; 5 % damping where none is stated yet.
-inline void excite(Tower& tower, Axis axis, std::vector<std::pair<double, double>> points) {
-  SpectrumStatement spectrum;
-  spectrum.name = "spectrum " + std::to_string(tower.spectra.size() + 1);
-  spectrum.points = std::move(points);
-  tower.spectra.push_back(spectrum);
-  if (!tower.seismic) tower.seismic.emplace();
-  tower.seismic->spectrum[static_cast<std::size_t>(axis)] = tower.spectra.size() - 1;
-  if (tower.damping.empty()) tower.damping = {0.05};
-}
+void excite(Tower& tower, Axis axis, std::vector<std::pair<double, double>> points);
 
 /// Excites an axis by the same acceleration [m/s2] at every period.
-inline void excite(Tower& tower, Axis axis, double acceleration) {
-  excite(tower, axis, {{0.0, acceleration}, {10.0, acceleration}});
-}
+void excite(Tower& tower, Axis axis, double acceleration);
 
 /// Bars without mass, so that only what the nodes carry has inertia.
-inline Tower massless(int dimensions) {
-  Tower tower = bare_tower(dimensions);
-  tower.materials.front().density = 0.0;
-  return tower;
-}
+[[nodiscard]] Tower massless(int dimensions);
 
 /// The two storeys of Chopra, Dynamics of Structures (from memory): masses 2 m and m on springs 2 k and k,
 /// with 2 k = kStiff. With phi_1 = (1, 2) and phi_2 = (1, -1) it follows by hand that omega^2 = k/2m and

@@ -1,30 +1,10 @@
-#pragma once
-
-#include <algorithm>
-#include <cmath>
-#include <random>
-#include <vector>
+#include "tests/support/models.hpp"
 
 #include <Eigen/Eigenvalues>
 
-#include "core/assembly.hpp"
-#include "modal/eigenproblem.hpp"
-#include "tests/support/matchers.hpp"
-#include "tests/support/towers.hpp"
-
-/// Matrices of towers, and a second eigensolver to hold the project's against.
 namespace swaymark::test {
 
-struct Model {
-  Assembly assembly;
-  Eigen::MatrixXd drive;  ///< b of every axis, n_free x n_axes
-
-  [[nodiscard]] const SparseMatrix& stiffness() const { return assembly.stiffness; }
-  [[nodiscard]] const SparseMatrix& mass() const { return assembly.mass; }
-  [[nodiscard]] Eigenproblem problem() const { return {assembly.stiffness, assembly.mass}; }
-};
-
-inline Model model_of(const Tower& tower) {
+Model model_of(const Tower& tower) {
   Model model{assemble(tower), {}};
   const auto& axes = model.assembly.dofs.axes();
   model.drive.resize(model.mass().rows(), static_cast<Index>(axes.size()));
@@ -35,28 +15,17 @@ inline Model model_of(const Tower& tower) {
   return model;
 }
 
-/// All modes from Eigen's generalized symmetric solver on the full matrices: a general-purpose reference
-/// library that goes another way (Cholesky of M, not of K). M positive definite.
-struct Oracle {
-  Eigen::VectorXd omega;   ///< ascending [rad/s]
-  Eigen::MatrixXd shapes;  ///< M-orthonormal
-};
-
-inline Oracle oracle_of(const Eigen::MatrixXd& stiffness, const Eigen::MatrixXd& mass) {
+Oracle oracle_of(const Eigen::MatrixXd& stiffness, const Eigen::MatrixXd& mass) {
   const Eigen::GeneralizedSelfAdjointEigenSolver<Eigen::MatrixXd> solver(stiffness, mass);
   REQUIRE(solver.info() == Eigen::Success);
   return {solver.eigenvalues().cwiseSqrt(), solver.eigenvectors()};
 }
 
-inline Oracle oracle_of(const Model& model) {
+Oracle oracle_of(const Model& model) {
   return oracle_of(Eigen::MatrixXd(model.stiffness()), Eigen::MatrixXd(model.mass()));
 }
 
-/// Frequencies of two solvers: each is good to rounding times the spread of the eigenvalues of a small tower.
-inline constexpr double kTwoSolvers = 1e-8;
-
-/// Frequencies agree, and so do the subspaces of all modes that a clear gap separates from the others.
-inline void check_same_modes(const Modes& modes, const Oracle& oracle, const SparseMatrix& mass) {
+void check_same_modes(const Modes& modes, const Oracle& oracle, const SparseMatrix& mass) {
   constexpr double clear_gap = 1e-4;  // the angle of a subspace is uncertain by rounding over the gap
   REQUIRE(modes.count() <= oracle.omega.size());
   for (Index j = 0; j < modes.count(); ++j) {
@@ -74,8 +43,7 @@ inline void check_same_modes(const Modes& modes, const Oracle& oracle, const Spa
   }
 }
 
-/// A mast without a mass of its own: only the top nodes have inertia.
-inline Tower massless_mast(int legs, int panels) {
+Tower massless_mast(int legs, int panels) {
   Mast mast;
   mast.legs = legs;
   mast.panels = panels;
