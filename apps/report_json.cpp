@@ -177,14 +177,27 @@ Json verdicts(const Analysis& a) {
   return list;
 }
 
+Json motion_of(const Tower& tower, const FreeMotion& motion) {
+  Json nodes = Json::object();
+  for (const FreeMotion::Part& part : motion.parts)
+    nodes[tower.nodes[part.node].name] = by_axis(tower, part.direction);
+  return nodes;
+}
+
+// `motion` is the first of its kind; all of them follow where there are several.
 Json mechanisms(const Analysis& a) {
   Json list = Json::array();
   for (const Mechanism& mechanism : a.mechanisms.mechanisms) {
-    Json motion = Json::object();
-    for (const auto& moved : mechanism.motion)
-      motion[a.tower.nodes[moved.node].name] = by_axis(a.tower, moved.direction);
-    list.push_back(
-        {{"kind", mechanism.kind}, {"count", 1}, {"motion", std::move(motion)}, {"cures", mechanism.cures}});
+    Json entry = {{"kind", mechanism.kind},
+                  {"count", mechanism.count()},
+                  {"motion", motion_of(a.tower, mechanism.motions.front())},
+                  {"cures", mechanism.cures}};
+    if (mechanism.count() > 1) {
+      entry["motions"] = Json::array();
+      for (const FreeMotion& motion : mechanism.motions)
+        entry["motions"].push_back(motion_of(a.tower, motion));
+    }
+    list.push_back(std::move(entry));
   }
   return list;
 }

@@ -12,45 +12,71 @@ namespace swaymark {
 
 namespace {
 
-std::string motion_words(const Tower& tower, const Mechanism::Motion& motion) {
+constexpr std::size_t kMostMechanisms = 20;
+constexpr std::size_t kMostLines = 6;  // nodes shown of one motion, and motions shown of one kind
+constexpr std::size_t kColumns = 100;
+
+std::string part_words(const Tower& tower, const FreeMotion::Part& part) {
   std::string parts;
   for (const Axis axis : tower.axes()) {
-    const double value = motion.direction[index_of(axis)];
+    const double value = part.direction[index_of(axis)];
     if (std::abs(value) < 1e-6) continue;
     parts += fmt::format("{}{} {}", parts.empty() ? "" : ", ", name_of(axis), figure(value, 3));
   }
-  return fmt::format("node {}: {}", tower.nodes[motion.node].name, parts);
+  return fmt::format("node {}: {}", tower.nodes[part.node].name, parts);
+}
+
+// Of one motion every node a line; of several, the leading node of each.
+std::string motion_lines(const Tower& tower, const Mechanism& mechanism) {
+  const bool one = mechanism.count() == 1;
+  const std::size_t all = one ? mechanism.motions.front().parts.size() : mechanism.count();
+  std::string out;
+  for (std::size_t i = 0; i < std::min(all, kMostLines); ++i) {
+    const auto& parts = mechanism.motions[one ? 0 : i].parts;
+    out += "       " + part_words(tower, parts[one ? i : 0]);
+    if (!one && parts.size() > 1)
+      out += fmt::format(", with {} other node{}", parts.size() - 1, parts.size() == 2 ? "" : "s");
+    out += "\n";
+  }
+  if (all > kMostLines) {
+    out += fmt::format("       and {} more {}; --json lists them all\n", all - kMostLines,
+                       one ? "nodes" : "motions");
+  }
+  return out;
+}
+
+std::string arithmetic(const MechanismReport& report) {
+  const MaxwellCount& count = report.maxwell;
+  std::string line = fmt::format("  bars {} + restraints {} - degrees of freedom {} = {}", count.bars,
+                                 count.restraints, count.dofs, count.surplus());
+  if (report.complete) {
+    const auto states = count.surplus() + static_cast<Index>(report.count());
+    line += fmt::format(" = states of self-stress {} - free motions {}", states, report.count());
+  }
+  return line + "\n";
 }
 
 }  // namespace
 
 std::string mechanism_text(const Analysis& analysis) {
-  constexpr std::size_t most_mechanisms = 20;
-  constexpr std::size_t most_nodes = 6;
-  const auto& list = analysis.mechanisms.mechanisms;
+  const MechanismReport& report = analysis.mechanisms;
+  const auto& list = report.mechanisms;
   std::string out =
       fmt::format("{}: the tower can move without straining a bar, in {}{} way{}; hold it as said below\n",
-                  analysis.provenance.file, analysis.mechanisms.complete ? "" : "at least ", list.size(),
-                  list.size() == 1 ? "" : "s");
-  const auto held = analysis.assembly.dofs.fixed_count();
-  out += fmt::format("  {} bars + {} fixed and {} sprung degrees of freedom against {} in all\n",
-                     analysis.tower.bars.size(), held, (analysis.assembly.springs.array() > 0.0).count(),
-                     analysis.assembly.dofs.dof_count());
-  for (std::size_t i = 0; i < std::min(list.size(), most_mechanisms); ++i) {
-    const Mechanism& mechanism = list[i];
-    out += fmt::format("  {}. {}\n", i + 1, mechanism.kind);
-    for (std::size_t n = 0; n < std::min(mechanism.motion.size(), most_nodes); ++n) {
-      out += "       " + motion_words(analysis.tower, mechanism.motion[n]) + "\n";
-    }
-    if (mechanism.motion.size() > most_nodes)
-      out += fmt::format("       and {} more nodes\n", mechanism.motion.size() - most_nodes);
-    for (const std::string& cure : mechanism.cures) out += wrapped(cure, "     cure: ", 100);
+                  analysis.provenance.file, report.complete ? "" : "more than ", report.count(),
+                  report.count() == 1 ? "" : "s");
+  out += arithmetic(report);
+  for (std::size_t i = 0; i < std::min(list.size(), kMostMechanisms); ++i) {
+    out += fmt::format("  {}. {}\n", i + 1, list[i].kind);
+    out += wrapped(list[i].what, "     ", kColumns);
+    out += motion_lines(analysis.tower, list[i]);
+    for (const std::string& cure : list[i].cures) out += wrapped(cure, "     cure: ", kColumns);
   }
+  if (list.size() > kMostMechanisms) out += fmt::format("  ... and {} more\n", list.size() - kMostMechanisms);
   for (const LooseNodes& loose : analysis.tower.lattice_leaves_loose) {
-    out += wrapped(loose.what, "  the pattern: ", 100);
-    for (const std::string& cure : loose.cures) out += wrapped(cure, "     cure: ", 100);
+    out += wrapped(loose.what, "  the pattern: ", kColumns);
+    for (const std::string& cure : loose.cures) out += wrapped(cure, "     cure: ", kColumns);
   }
-  if (list.size() > most_mechanisms) out += fmt::format("  ... and {} more\n", list.size() - most_mechanisms);
   return out;
 }
 

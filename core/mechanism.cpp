@@ -1,263 +1,246 @@
 #include "core/mechanism.hpp"
 
 #include <algorithm>
-#include <cmath>
+#include <map>
+#include <utility>
 
-#include <Eigen/Eigenvalues>
-#include <Eigen/QR>
-#include <Eigen/SparseCholesky>
 #include <fmt/format.h>
 
+#include "core/cure.hpp"
+#include "core/motion_kind.hpp"
 #include "core/text.hpp"
 
 namespace swaymark {
 
 namespace {
 
-// A node whose bars leave a direction open to within this much of their unit stiffness; a slope of 1e-5.
-constexpr double kLocalOpen = 1e-10;
-// Pivots below this share of their diagonal make the whole suspect. Rounding lifts the pivot of a mechanism,
-// by far more than its own size where the pivots before it are small, so that this only spares stiff towers
-// the search.
-constexpr double kSuspectPivot = 1e-6;
-// Strain energy of a unit motion at unit stiffness. Rounding leaves 1e-30; the softest sound tower 1e-14.
-constexpr double kNoStrain = 1e-22;
-constexpr double kMoves = 1e-6;    // of the largest component: below it a node stands still
-constexpr Index kMostGlobal = 40;  // independent motions of the whole that are looked for
-constexpr std::size_t kMostListed = 2000;
+// How a single node that its bars leave free is told.
+struct NodeWords {
+  std::string_view kind;
+  std::string_view one;
+  std::string_view many;
+  std::string_view square_to;
+  std::string_view square_to_each;
+};
 
-// E: n_bars + n_springs rows, each the elongation of one bar or spring per free displacement.
-SparseMatrix elongation_matrix(const Assembly& assembly) {
-  std::vector<Eigen::Triplet<double>> triplets;
-  const DofMap& dofs = assembly.dofs;
-  Index row = 0;
-  for (const BarElement& bar : assembly.bars) {
-    for (std::size_t i = 0; i < dofs.axes().size(); ++i) {
-      const double value = bar.direction[index_of(dofs.axes()[i])];
-      const Index from = dofs.free(dofs.dof(bar.from, i));
-      const Index to = dofs.free(dofs.dof(bar.to, i));
-      if (from >= 0) triplets.emplace_back(row, from, -value);
-      if (to >= 0) triplets.emplace_back(row, to, value);
+constexpr NodeWords words_of(MotionKind kind) {
+  switch (kind) {
+    case MotionKind::line_node:
+      return {"node square to a line", "node", "nodes", "square to its bars, which are in one line",
+              "square to their bars, which are in one line"};
+    case MotionKind::mid_node:
+      return {"node square to a face", "mid node of K-bracing", "mid nodes of K-bracing",
+              "square to its face", "square to their faces"};
+    case MotionKind::crossing_node:
+      return {"node square to a face", "node where diagonals cross", "nodes where diagonals cross",
+              "square to its face", "square to their faces"};
+    default:
+      return {"node square to a face", "node", "nodes", "square to its bars, which are in one plane",
+              "square to their bars, which are in one plane"};
+  }
+}
+
+class Report {
+ public:
+  Report(const Tower& tower, FreeMotions motions)
+      : tower_(tower), kinds_(tower), cures_(tower, motions), motions_(std::move(motions)) {}
+
+  std::vector<Mechanism> run() {
+    for (FreeMotion& motion : motions_.list) {
+      Mechanism& group = groups_[key_of(motion)];
+      group.motions.push_back(std::move(motion));
     }
-    ++row;
+    std::vector<Mechanism> result;
+    for (auto& [key, group] : groups_) {
+      std::stable_sort(group.motions.begin(), group.motions.end(),
+                       [](const FreeMotion& a, const FreeMotion& b) {
+                         return a.parts.front().node < b.parts.front().node;
+                       });
+      describe(group, key.first);
+      result.push_back(std::move(group));
+    }
+    return result;
   }
-  for (Index i = 0; i < assembly.springs.size(); ++i) {
-    if (assembly.springs(i) > 0.0) triplets.emplace_back(row++, i, 1.0);
+
+ private:
+  // What belongs together, in the order of the report: a kind, and of bodies on too few supports each by
+  // itself.
+  using Key = std::pair<MotionKind, std::size_t>;
+
+  [[nodiscard]] Key key_of(const FreeMotion& motion) const {
+    const MotionKind kind = kinds_.of(motion);
+    return {kind, kind == MotionKind::on_too_few_supports ? body_of(motion.parts.front().node).front() : 0};
   }
-  SparseMatrix elongation(row, dofs.free_count());
-  elongation.setFromTriplets(triplets.begin(), triplets.end());
-  return elongation;
-}
 
-// The axes that are free at a node, and their numbers.
-struct FreeAxes {
-  std::vector<Index> numbers;
-  std::vector<Axis> axes;
-};
+  [[nodiscard]] std::string name(std::size_t n) const { return excerpt(tower_.nodes[n].name); }
 
-FreeAxes free_axes(const DofMap& dofs, std::size_t node) {
-  FreeAxes result;
-  for (std::size_t k = 0; k < dofs.axes().size(); ++k) {
-    const Index number = dofs.free(dofs.dof(node, k));
-    if (number < 0) continue;
-    result.numbers.push_back(number);
-    result.axes.push_back(dofs.axes()[k]);
+  // "a", "a, b and c" or "a, b ... z"
+  [[nodiscard]] std::string names(std::vector<std::size_t> nodes) const {
+    std::sort(nodes.begin(), nodes.end());
+    nodes.erase(std::unique(nodes.begin(), nodes.end()), nodes.end());
+    if (nodes.size() == 1) return name(nodes[0]);
+    if (nodes.size() == 2) return fmt::format("{} and {}", name(nodes[0]), name(nodes[1]));
+    if (nodes.size() == 3)
+      return fmt::format("{}, {} and {}", name(nodes[0]), name(nodes[1]), name(nodes[2]));
+    return fmt::format("{}, {} ... {}", name(nodes[0]), name(nodes[1]), name(nodes.back()));
   }
-  return result;
-}
 
-std::string direction_words(const Eigen::Vector3d& direction) {
-  for (const Axis axis : kAllAxes) {
-    if (std::abs(std::abs(direction[index_of(axis)]) - 1.0) < kMoves) return std::string(name_of(axis));
+  [[nodiscard]] static std::vector<std::size_t> nodes_of(const FreeMotion& motion) {
+    std::vector<std::size_t> nodes;
+    for (const auto& part : motion.parts) nodes.push_back(part.node);
+    return nodes;
   }
-  return fmt::format("({:.3g}, {:.3g}, {:.3g})", direction.x(), direction.y(), direction.z());
-}
 
-Mechanism local_mechanism(const Tower& tower, std::size_t node, const Eigen::Vector3d& direction,
-                          bool loose) {
-  Mechanism mechanism;
-  const std::string name = excerpt(tower.nodes[node].name);
-  const std::string words = direction_words(direction);
-  mechanism.kind = loose ? "loose node" : "node free square to its bars";
-  mechanism.motion = {{node, direction}};
-  if (loose) {
-    mechanism.cures = {fmt::format("join node '{}' to the tower by bars, or remove it", name)};
-  } else {
-    mechanism.cures = {fmt::format("add a bar at node '{}' that has a part along {}", name, words),
-                       fmt::format("or hold node '{}' along {} by a support", name, words)};
+  [[nodiscard]] static std::vector<std::size_t> leading_nodes(const Mechanism& group) {
+    std::vector<std::size_t> nodes;
+    for (const FreeMotion& motion : group.motions) nodes.push_back(motion.parts.front().node);
+    return nodes;
   }
-  return mechanism;
-}
 
-struct LocalSearch {
-  std::vector<Mechanism> mechanisms;
-  SparseMatrix elongation;  // with a row more for each mechanism, as if a unit spring held it
-};
+  void describe(Mechanism& group, MotionKind kind) const {
+    switch (kind) {
+      case MotionKind::loose_node:
+        return describe_loose(group);
+      case MotionKind::on_too_few_supports:
+        return describe_body(group);
+      case MotionKind::mid_node:
+      case MotionKind::crossing_node:
+      case MotionKind::face_node:
+      case MotionKind::line_node:
+        return describe_nodes(group, words_of(kind));
+      default:
+        describe_shapes(group, kind);
+    }
+  }
 
-// Motions open at single nodes, and a spring for each so that the rest can be looked at without them.
-LocalSearch local_mechanisms(const Tower& tower, const Assembly& assembly, const SparseMatrix& elongation) {
-  std::vector<Mechanism> found;
-  std::vector<Eigen::Triplet<double>> springs;
-  const SparseMatrix stiffness = elongation.transpose() * elongation;
-  for (std::size_t node = 0; node < tower.nodes.size(); ++node) {
-    const FreeAxes open = free_axes(assembly.dofs, node);
-    const auto size = static_cast<Index>(open.numbers.size());
-    if (size == 0) continue;
-    Eigen::MatrixXd block(size, size);
-    for (Index i = 0; i < size; ++i) {
-      for (Index j = 0; j < size; ++j) {
-        block(i, j) = stiffness.coeff(open.numbers[static_cast<std::size_t>(i)],
-                                      open.numbers[static_cast<std::size_t>(j)]);
+  void describe_loose(Mechanism& group) const {
+    std::vector<std::size_t> nodes = leading_nodes(group);
+    std::sort(nodes.begin(), nodes.end());
+    nodes.erase(std::unique(nodes.begin(), nodes.end()), nodes.end());
+    const bool one = nodes.size() == 1;
+    group.kind = "loose node";
+    group.what = fmt::format("{} without a bar: {}", one ? "a node" : fmt::format("{} nodes", nodes.size()),
+                             names(nodes));
+    group.cures = {one ? "join the node to the tower by bars, or remove it"
+                       : "join each of them to the tower by bars, or remove it"};
+  }
+
+  void describe_nodes(Mechanism& group, const NodeWords& words) const {
+    group.kind = words.kind;
+    const FreeMotion& first = group.motions.front();
+    if (group.count() == 1) {
+      group.what = fmt::format("{} {}, {}, along {}", words.one, name(first.parts.front().node),
+                               words.square_to, direction_words(first.parts.front().direction));
+    } else {
+      std::vector<std::size_t> nodes = leading_nodes(group);
+      std::sort(nodes.begin(), nodes.end());
+      const auto distinct = std::unique(nodes.begin(), nodes.end()) - nodes.begin();
+      group.what = fmt::format(
+          "{} {}, {}{}: {}", distinct, distinct == 1 ? words.one : words.many,
+          distinct == 1 ? words.square_to : words.square_to_each,
+          group.count() > static_cast<std::size_t>(distinct) ? ", in two directions" : "", names(nodes));
+    }
+    add_cures(group);
+  }
+
+  void describe_body(Mechanism& group) const {
+    const std::vector<std::size_t> body = body_of(group.motions.front().parts.front().node);
+    std::size_t with_bars = 0;
+    for (std::size_t node = 0; node < tower_.nodes.size(); ++node) with_bars += kinds_.has_bars(node) ? 1 : 0;
+    const bool whole = body.size() == with_bars;
+    group.kind = whole ? "tower on too few supports" : "part on too few supports";
+    const std::string ways = fmt::format("{} way{}", group.count(), group.count() == 1 ? "" : "s");
+    group.what = whole ? fmt::format("the whole tower moves as a body, in {}", ways)
+                       : fmt::format("{} nodes that no bar joins to the rest move as a body, in {}: {}",
+                                     body.size(), ways, names(body));
+    group.cures = cures_.supports(group.motions);
+    if (!whole) group.cures.emplace_back("or join this part to the rest by bars");
+  }
+
+  // The nodes that bars join to this one, itself included, in their order.
+  [[nodiscard]] std::vector<std::size_t> body_of(std::size_t start) const {
+    std::vector<std::vector<std::size_t>> next(tower_.nodes.size());
+    for (const Bar& bar : tower_.bars) {
+      next[bar.from].push_back(bar.to);
+      next[bar.to].push_back(bar.from);
+    }
+    std::vector<bool> seen(tower_.nodes.size(), false);
+    std::vector<std::size_t> body{start};
+    seen[start] = true;
+    for (std::size_t i = 0; i < body.size(); ++i) {
+      for (const std::size_t other : next[body[i]]) {
+        if (!seen[other]) body.push_back(other);
+        seen[other] = true;
       }
     }
-    const Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd> solver(block);
-    const double largest = solver.eigenvalues()(size - 1);
-    for (Index k = 0; k < size && solver.eigenvalues()(k) <= kLocalOpen * std::max(1.0, largest); ++k) {
-      const Eigen::VectorXd vector = solver.eigenvectors().col(k);
-      Eigen::Vector3d direction = Eigen::Vector3d::Zero();
-      for (Index i = 0; i < size; ++i)
-        direction[index_of(open.axes[static_cast<std::size_t>(i)])] = vector(i);
-      Index leading = 0;
-      direction.cwiseAbs().maxCoeff(&leading);
-      direction /= direction[leading];
-      const Index row = elongation.rows() + static_cast<Index>(found.size());
-      for (Index i = 0; i < size; ++i)
-        springs.emplace_back(row, open.numbers[static_cast<std::size_t>(i)], vector(i));
-      found.push_back(local_mechanism(tower, node, direction, largest <= 0.0));
+    std::sort(body.begin(), body.end());
+    return body;
+  }
+
+  void describe_shapes(Mechanism& group, MotionKind kind) const {
+    const FreeMotion& first = group.motions.front();
+    const std::string nodes = names(nodes_of(first));
+    const std::size_t count = group.count();
+    const std::string example = count == 1 ? nodes : fmt::format("for example {}", nodes);
+    const auto text = [&](std::string_view one, std::string_view many) {
+      return fmt::format("{}: {}", count == 1 ? std::string(one) : fmt::format("{} {}", count, many),
+                         example);
+    };
+    switch (kind) {
+      case MotionKind::plan_distortion:
+        group.kind = "plan distortion of a level";
+        group.what = text("a level distorts in plan", "levels distort in plan");
+        break;
+      case MotionKind::sway:
+        group.kind = "sway of a panel";
+        group.what =
+            text("all from one level upwards moves as a body", "ways in which levels move as a body");
+        break;
+      case MotionKind::part_as_body:
+        group.kind = "part of the tower moves as a body";
+        group.what = text("nodes that move together", "parts that move as bodies");
+        break;
+      default:
+        group.kind = "part of the tower changes its shape";
+        group.what = text("nodes that move between bars that keep their lengths",
+                          "ways in which nodes move between bars that keep their lengths");
     }
+    add_cures(group);
   }
-  if (found.empty()) return {{}, elongation};
-  for (Index column = 0; column < elongation.outerSize(); ++column) {
-    for (SparseMatrix::InnerIterator entry(elongation, column); entry; ++entry) {
-      springs.emplace_back(entry.row(), column, entry.value());
-    }
-  }
-  SparseMatrix extended(elongation.rows() + static_cast<Index>(found.size()), elongation.cols());
-  extended.setFromTriplets(springs.begin(), springs.end());
-  LocalSearch result;
-  result.mechanisms = std::move(found);
-  result.elongation.swap(extended);
-  return result;
-}
 
-using Factor = Eigen::SimplicialLDLT<SparseMatrix>;
+  void add_cures(Mechanism& group) const {
+    const FreeMotion& first = group.motions.front();
+    const std::string_view each = group.count() > 1 ? "for each of them, for example: " : "";
+    for (const std::string& bar : cures_.bars(first))
+      group.cures.push_back(fmt::format("{}{}{}", group.cures.empty() ? "" : "or ", each, bar));
+    const std::string support = cures_.supports({first}).front();
+    group.cures.push_back(fmt::format("{}{}{}", group.cures.empty() ? "" : "or ", each, support));
+  }
 
-// How many pivots are tiny against the diagonal they started from.
-Index suspect_pivots(const Factor& factor, const SparseMatrix& matrix) {
-  const Eigen::VectorXd pivots = factor.vectorD();
-  const Eigen::VectorXd diagonal = factor.permutationP() * Eigen::VectorXd(matrix.diagonal());
-  Index count = 0;
-  for (Index i = 0; i < pivots.size(); ++i) {
-    if (!(pivots(i) > kSuspectPivot * diagonal(i))) ++count;
-  }
-  return count;
-}
-
-// Columns span the motions of the whole that strain nothing: block inverse iteration on K + eps I, then the
-// singular vectors of the elongations within the block.
-Eigen::MatrixXd strainless_motions(const SparseMatrix& stiffness, const SparseMatrix& elongation,
-                                   Index suspects) {
-  const Index n = stiffness.rows();
-  const Index block = std::min<Index>(n, std::min<Index>(suspects, kMostGlobal) + 8);
-  constexpr double shift = 1e-13;
-  SparseMatrix shifted = stiffness;
-  for (Index i = 0; i < n; ++i) shifted.coeffRef(i, i) += shift;
-  Factor factor(shifted);
-  if (factor.info() != Eigen::Success) return Eigen::MatrixXd(n, 0);
-  Eigen::MatrixXd basis(n, block);
-  std::uint64_t state = 20'011;  // fixed, so that the same tower gives the same list
-  for (Index j = 0; j < block; ++j) {
-    for (Index i = 0; i < n; ++i) {
-      state = state * 6364136223846793005ULL + 1442695040888963407ULL;
-      basis(i, j) = static_cast<double>(state >> 11U) / 9007199254740992.0 - 0.5;
-    }
-  }
-  const auto orthonormal = [&](const Eigen::MatrixXd& columns) {
-    const Eigen::HouseholderQR<Eigen::MatrixXd> qr(columns);
-    return Eigen::MatrixXd(qr.householderQ() * Eigen::MatrixXd::Identity(n, block));
-  };
-  for (int sweep = 0; sweep < 6; ++sweep) basis = orthonormal(factor.solve(basis));
-  const Eigen::MatrixXd strains = elongation * basis;
-  const Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd> solver(strains.transpose() * strains);
-  Index strainless = 0;
-  for (Index j = 0; j < block; ++j) {
-    const Eigen::VectorXd motion = basis * solver.eigenvectors().col(j);
-    if ((elongation * motion).squaredNorm() < kNoStrain) ++strainless;
-  }
-  // A full block may have left some out.
-  if (strainless == block && block < n && suspects < kMostGlobal)
-    return strainless_motions(stiffness, elongation, std::min(2 * suspects + 8, kMostGlobal));
-  return basis * solver.eigenvectors().leftCols(strainless);
-}
-
-// Each column 1 at a degree of freedom of its own where the others are 0: motions as local as the space
-// allows.
-Eigen::MatrixXd localised(Eigen::MatrixXd basis) {
-  for (Index j = 0; j < basis.cols(); ++j) {
-    Index row = 0;
-    Index column = 0;
-    basis.rightCols(basis.cols() - j).cwiseAbs().maxCoeff(&row, &column);
-    basis.col(j).swap(basis.col(j + column));
-    basis.col(j) /= basis(row, j);
-    for (Index k = 0; k < basis.cols(); ++k) {
-      if (k != j) basis.col(k) -= basis(row, k) * basis.col(j);
-    }
-  }
-  return basis;
-}
-
-Mechanism global_mechanism(const Tower& tower, const DofMap& dofs, const Eigen::VectorXd& motion) {
-  Mechanism mechanism;
-  const double largest = motion.cwiseAbs().maxCoeff();
-  const Eigen::VectorXd all = dofs.expand(motion / largest);
-  for (std::size_t node = 0; node < tower.nodes.size(); ++node) {
-    Eigen::Vector3d direction = Eigen::Vector3d::Zero();
-    for (std::size_t k = 0; k < dofs.axes().size(); ++k)
-      direction[index_of(dofs.axes()[k])] = all(dofs.dof(node, k));
-    if (direction.cwiseAbs().maxCoeff() > kMoves) mechanism.motion.push_back({node, direction});
-  }
-  std::stable_sort(mechanism.motion.begin(), mechanism.motion.end(), [](const auto& a, const auto& b) {
-    return a.direction.norm() > b.direction.norm() * (1 + 1e-9);
-  });
-  const bool whole = mechanism.motion.size() == tower.nodes.size();
-  const auto& lead = mechanism.motion.front();
-  const std::string name = excerpt(tower.nodes[lead.node].name);
-  if (whole) {
-    mechanism.kind = "the whole tower moves";
-    mechanism.cures = {fmt::format("support the tower against it, for example node '{}' along {}", name,
-                                   direction_words(lead.direction))};
-  } else {
-    mechanism.kind = "part of the tower moves";
-    mechanism.cures = {
-        fmt::format(
-            "add a bar between a node that moves and one that does not, for example at node '{}' along {}",
-            name, direction_words(lead.direction)),
-        fmt::format("or hold node '{}' by a support", name)};
-  }
-  return mechanism;
-}
+  const Tower& tower_;
+  MotionKinds kinds_;
+  Cures cures_;
+  FreeMotions motions_;
+  std::map<Key, Mechanism> groups_;
+};
 
 }  // namespace
 
+std::size_t MechanismReport::count() const {
+  std::size_t result = 0;
+  for (const Mechanism& mechanism : mechanisms) result += mechanism.count();
+  return result;
+}
+
 MechanismReport find_mechanisms(const Tower& tower, const Assembly& assembly) {
   MechanismReport report;
-  if (assembly.dofs.free_count() == 0) return report;
-  LocalSearch local = local_mechanisms(tower, assembly, elongation_matrix(assembly));
-  report.mechanisms = std::move(local.mechanisms);
-  const SparseMatrix stiffness = local.elongation.transpose() * local.elongation;
-  const Factor factor(stiffness);
-  const Index suspects = factor.info() == Eigen::Success ? suspect_pivots(factor, stiffness) : kMostGlobal;
-  if (suspects > 0) {
-    const Eigen::MatrixXd motions = localised(strainless_motions(stiffness, local.elongation, suspects));
-    for (Index j = 0; j < motions.cols(); ++j) {
-      report.mechanisms.push_back(global_mechanism(tower, assembly.dofs, motions.col(j)));
-    }
-    report.complete = motions.cols() <= kMostGlobal;
-  }
-  if (report.mechanisms.size() > kMostListed) {
-    report.mechanisms.resize(kMostListed);
-    report.complete = false;
-  }
+  FreeMotions motions = find_free_motions(tower, assembly);
+  report.complete = motions.complete;
+  report.maxwell = {static_cast<Index>(tower.bars.size()),
+                    assembly.dofs.fixed_count() + (assembly.springs.array() > 0.0).count(),
+                    assembly.dofs.dof_count()};
+  if (motions.list.empty()) return report;
+  report.mechanisms = Report(tower, std::move(motions)).run();
   return report;
 }
 

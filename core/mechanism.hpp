@@ -3,35 +3,40 @@
 #include <string>
 #include <vector>
 
-#include "core/assembly.hpp"
+#include "core/free_motion.hpp"
 
 namespace swaymark {
 
-/// One way in which nodes can move without straining any bar or spring.
+/// Free motions of one kind, which one cure each would hold.
 struct Mechanism {
-  struct Motion {
-    std::size_t node = 0;
-    Eigen::Vector3d direction = Eigen::Vector3d::Zero();  ///< largest component over the mechanism: 1
-  };
-  std::string kind;
-  std::vector<Motion> motion;  ///< largest first
-  std::vector<std::string> cures;
+  std::string kind;                 ///< "node square to a face", "plan distortion of a level", ...
+  std::string what;                 ///< "24 mid nodes of K-bracing, square to their faces: L1.m1 ... L6.m4"
+  std::vector<FreeMotion> motions;  ///< independent of each other
+  std::vector<std::string> cures;   ///< the smallest first; of several motions, shown for the first
+
+  [[nodiscard]] std::size_t count() const { return motions.size(); }
+};
+
+/// Maxwell's count: bars + restraints - degrees of freedom = states of self-stress - free motions.
+struct MaxwellCount {
+  Index bars = 0;
+  Index restraints = 0;  ///< axes held by a support or a spring
+  Index dofs = 0;        ///< nodes times axes
+
+  [[nodiscard]] Index surplus() const { return bars + restraints - dofs; }
 };
 
 struct MechanismReport {
   std::vector<Mechanism> mechanisms;
-  bool complete = true;  ///< false where the list was cut because there are very many
+  MaxwellCount maxwell;
+  bool complete = true;  ///< false where there are more that could not be told apart
 
-  [[nodiscard]] bool any() const { return !mechanisms.empty(); }
+  [[nodiscard]] bool any() const { return !mechanisms.empty() || !complete; }
+  /// Independent free motions of all kinds.
+  [[nodiscard]] std::size_t count() const;
 };
 
-/// Finds what lets a pin-jointed tower move.
-///
-/// The search looks at geometry only: every bar and spring counts with unit stiffness, so that a soft bar is
-/// never taken for a missing one. First each node is looked at with its neighbours held (a direction no bar
-/// or support opposes); then, with those held, the whole: a null space of the unit stiffness found by inverse
-/// iteration and confirmed by the elongations themselves, which are accurate to rounding where uT K u is not.
-/// Cost: one sparse factorisation where the tower is stable.
+/// What lets a pin-jointed tower move, by kinds, each with what would hold it; see find_free_motions().
 [[nodiscard]] MechanismReport find_mechanisms(const Tower& tower, const Assembly& assembly);
 
 }  // namespace swaymark

@@ -243,6 +243,20 @@ TEST_CASE("modes alone leave out bands seismic response and verdicts") {
         Keys{"swaymark", "title", "input", "model", "mass", "mass_matrix", "modes", "completeness", "notes"});
 }
 
+TEST_CASE("motions of one kind are written as one entry with every motion") {
+  // Two bars that swing about their held feet.
+  const Analysis analysis =
+      checked(tower_with({"nodes: {a: [0, 0], b: [2, 0], c: [1, 1], d: [3, 1]}",
+                          "members: [{group: g, section: bar, material: steel, bars: [[a, c], [b, d]]}]"}));
+  const Json json = json_of(analysis);
+  REQUIRE(json["mechanisms"].size() == 1);
+  const Json& mechanism = json["mechanisms"][0];
+  CHECK(mechanism["count"] == 2);
+  REQUIRE(mechanism["motions"].size() == 2);
+  CHECK(mechanism["motions"][0] == mechanism["motion"]);
+  CHECK(keys_of(mechanism["motions"][1]) == Keys{"d"});
+}
+
 TEST_CASE("a mechanism is written with its motion and cures in place of modes") {
   const Json json = json_of(checked(swinging_bar()));
   CHECK(keys_of(json) ==

@@ -1,5 +1,7 @@
 #include <numbers>
 
+#include <Eigen/Geometry>
+
 #include "modal/participation.hpp"
 #include "spectrum/combine_modes.hpp"
 #include "spectrum/peak.hpp"

@@ -32,7 +32,7 @@ std::string file_of(const std::string& lattice, const std::string& rest = "") {
 std::size_t mechanisms(const Tower& tower) {
   const MechanismReport report = find_mechanisms(tower, assemble(tower));
   CHECK(report.complete);
-  return report.mechanisms.size();
+  return report.count();
 }
 
 // Independent motions that strain no bar, by the rank of the dense matrix of elongations: an oracle that is

@@ -1,3 +1,5 @@
+#include <Eigen/Eigenvalues>
+
 #include "modal/eigenproblem.hpp"
 #include "tests/support/models.hpp"
 

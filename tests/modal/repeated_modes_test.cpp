@@ -2,6 +2,8 @@
 
 #include <numbers>
 
+#include <Eigen/Geometry>
+
 #include "modal/participation.hpp"
 #include "tests/support/models.hpp"
 
