@@ -69,6 +69,27 @@ void add_mass(const BarElement& bar, MassShares shares, const DofMap& dofs, Bloc
   }
 }
 
+// k [1, -a; -a^T, a a^T] with a = 1/n for each of the n others.
+void add_link(const Link& link, Blocks& blocks) {
+  const double share = 1.0 / static_cast<double>(link.others.size());
+  blocks.add(link.dof, link.dof, link.stiffness);
+  for (const Index i : link.others) {
+    blocks.add(link.dof, i, -share * link.stiffness);
+    blocks.add(i, link.dof, -share * link.stiffness);
+    for (const Index j : link.others) blocks.add(i, j, share * share * link.stiffness);
+  }
+}
+
+void add_liquid(const Liquid& liquid, const DofMap& dofs, Blocks& blocks) {
+  const LiquidSplit split = split_liquid(liquid);
+  for (std::size_t k = 0; k < dofs.axes().size(); ++k) {
+    const double each = liquid_on_node(liquid, split, dofs.axes()[k]);
+    for (const std::size_t node : liquid.nodes) blocks.add(dofs.dof(node, k), dofs.dof(node, k), each);
+    if (!liquid.node || dofs.axes()[k] == Axis::z) continue;
+    blocks.add(dofs.dof(*liquid.node, k), dofs.dof(*liquid.node, k), split.convective);
+  }
+}
+
 SparseMatrix axial_forces(const std::vector<BarElement>& bars, const DofMap& dofs) {
   Triplets triplets;
   for (std::size_t b = 0; b < bars.size(); ++b) {
@@ -94,7 +115,7 @@ void check_finite(const Tower& tower, const std::vector<BarElement>& bars) {
 }  // namespace
 
 Assembly assemble(const Tower& tower) {
-  Assembly result{DofMap(tower), bar_elements(tower), {}, {}, {}, {}, {}, {}, {}};
+  Assembly result{DofMap(tower), bar_elements(tower), {}, {}, {}, {}, {}, {}, {}, {}};
   const DofMap& dofs = result.dofs;
   check_finite(tower, result.bars);
   Blocks stiffness{dofs, {}, {}, {}};
@@ -111,6 +132,9 @@ Assembly assemble(const Tower& tower) {
         mass.add(dofs.dof(node, i), dofs.dof(node, i), each);
     }
   }
+  for (const Liquid& liquid : tower.liquids) add_liquid(liquid, dofs, mass);
+  result.links = liquid_links(tower, dofs);
+  for (const Link& link : result.links) add_link(link, stiffness);
   result.springs = Eigen::VectorXd::Zero(dofs.free_count());
   for (const Support& support : tower.supports) {
     for (std::size_t i = 0; i < dofs.axes().size(); ++i) {

@@ -4,6 +4,7 @@
 
 #include "core/bar.hpp"
 #include "core/dof_map.hpp"
+#include "core/liquid.hpp"
 #include "core/matrix.hpp"
 #include "core/tower.hpp"
 
@@ -20,6 +21,7 @@ struct Assembly {
   SparseMatrix mass_all;           ///< M [kg], n_dof x n_dof
   SparseMatrix axial;       ///< n_bars x n_free: bar forces [N], tension positive, from free displacements
   Eigen::VectorXd springs;  ///< n_free: stiffness of the support spring at each free dof [N/m]
+  std::vector<Link> links;  ///< springs between nodes that are no bars
 };
 
 /// \throws ComputationError if a coefficient is not finite.    Cost: linear in nodes and bars.

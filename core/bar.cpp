@@ -1,5 +1,7 @@
 #include "core/bar.hpp"
 
+#include "core/ice.hpp"
+
 namespace swaymark {
 
 MassShares mass_shares(MassScheme scheme) {
@@ -39,6 +41,7 @@ std::vector<BarElement> bar_elements(const Tower& tower) {
     element.axial_stiffness = material.youngs_modulus * area / element.length;
     element.own_mass = material.density * area * element.length;
     element.carried_mass = share[bar.group] * element.own_mass + per_length[bar.group] * element.length;
+    for (const IceMass& ice : tower.ice) element.carried_mass += ice_on_bar(tower, ice, bar, element.length);
     elements.push_back(element);
   }
   return elements;

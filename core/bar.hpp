@@ -26,7 +26,7 @@ struct BarElement {
   double length = 0.0;                                  ///< L [m]
   double axial_stiffness = 0.0;                         ///< EA/L [N/m]
   double own_mass = 0.0;                                ///< rho A L [kg]
-  double carried_mass = 0.0;                            ///< allowance and linear ancillaries [kg]
+  double carried_mass = 0.0;                            ///< allowance, linear ancillaries and ice [kg]
 
   [[nodiscard]] double mass() const { return own_mass + carried_mass; }
 };

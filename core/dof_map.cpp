@@ -10,6 +10,12 @@ DofMap::DofMap(const Tower& tower) : axes_(tower.axes()) {
       if (support.fixed[static_cast<std::size_t>(axes_[k])]) held[support.node * axes_.size() + k] = true;
     }
   }
+  for (const Liquid& liquid : tower.liquids) {
+    if (!liquid.node) continue;
+    for (std::size_t k = 0; k < axes_.size(); ++k) {
+      if (axes_[k] == Axis::z) held[*liquid.node * axes_.size() + k] = true;
+    }
+  }
   free_.assign(count, -1);
   fixed_.assign(count, -1);
   for (std::size_t dof = 0; dof < count; ++dof) {

@@ -9,7 +9,8 @@ namespace swaymark {
 
 /// The degrees of freedom of a tower: one for each node and axis, numbered dof = d * node + (place of the
 /// axis among the tower's d axes). Free ones and fixed ones are numbered again from 0, each in the order of
-/// dof.
+/// dof. What sloshes in a tank moves sideways only: upright its node is held, without a support and without
+/// mass.
 class DofMap {
  public:
   explicit DofMap(const Tower& tower);

@@ -34,7 +34,8 @@ constexpr Index kMostDense = 600;      // suspects that stand for no free motion
 
 class Search {
  public:
-  Search(const Tower& tower, const Assembly& assembly) : tower_(tower), dofs_(assembly.dofs) {
+  Search(const Tower& tower, const Assembly& assembly)
+      : tower_(tower), dofs_(assembly.dofs), links_(assembly.links) {
     add_elongations(assembly);
     held_.resize(static_cast<std::size_t>(dofs_.dof_count()), false);
     for (std::size_t dof = 0; dof < held_.size(); ++dof) {
@@ -52,7 +53,7 @@ class Search {
   }
 
  private:
-  // One row for each bar, spring and hold: its elongation per free displacement.
+  // One row for each bar, spring, link and hold: its elongation per free displacement.
   void add_elongations(const Assembly& assembly) {
     for (const BarElement& bar : assembly.bars) {
       for (std::size_t i = 0; i < dofs_.axes().size(); ++i) {
@@ -66,6 +67,14 @@ class Search {
     }
     for (Index i = 0; i < assembly.springs.size(); ++i) {
       if (assembly.springs(i) > 0.0) elongation_.emplace_back(rows_++, i, 1.0);
+    }
+    for (const Link& link : links_) {
+      const double share = 1.0 / static_cast<double>(link.others.size());
+      if (dofs_.free(link.dof) >= 0) elongation_.emplace_back(rows_, dofs_.free(link.dof), 1.0);
+      for (const Index other : link.others) {
+        if (dofs_.free(other) >= 0) elongation_.emplace_back(rows_, dofs_.free(other), -share);
+      }
+      ++rows_;
     }
   }
 
@@ -86,6 +95,10 @@ class Search {
           (tower_.nodes[bar.to].position - tower_.nodes[bar.from].position).normalized();
       stiffness[bar.from] += along * along.transpose();
       stiffness[bar.to] += along * along.transpose();
+    }
+    for (const Link& link : links_) {
+      const Index axis = index_of(dofs_.axis_of(link.dof));
+      stiffness[dofs_.node_of(link.dof)](axis, axis) += 1.0;
     }
     open_.resize(tower_.nodes.size());
     for (std::size_t node = 0; node < tower_.nodes.size(); ++node) look_at_node(node, stiffness[node]);
@@ -116,7 +129,7 @@ class Search {
     }
   }
 
-  // The nodes of each part that bars join, two nodes at least.
+  // The nodes of each part that bars join, with the liquids in it; two nodes at least.
   [[nodiscard]] std::vector<std::vector<std::size_t>> bodies() const {
     std::vector<std::size_t> root(tower_.nodes.size());
     std::iota(root.begin(), root.end(), std::size_t{0});
@@ -124,10 +137,14 @@ class Search {
       while (root[node] != node) node = root[node] = root[root[node]];
       return node;
     };
-    for (const Bar& bar : tower_.bars) {
-      const std::size_t a = find(bar.from);
-      const std::size_t b = find(bar.to);
+    const auto join = [&](std::size_t one, std::size_t other) {
+      const std::size_t a = find(one);
+      const std::size_t b = find(other);
       root[std::max(a, b)] = std::min(a, b);
+    };
+    for (const Bar& bar : tower_.bars) join(bar.from, bar.to);
+    for (const Link& link : links_) {
+      for (const Index other : link.others) join(dofs_.node_of(link.dof), dofs_.node_of(other));
     }
     std::vector<std::vector<std::size_t>> members(tower_.nodes.size());
     for (std::size_t node = 0; node < tower_.nodes.size(); ++node) members[find(node)].push_back(node);
@@ -167,6 +184,8 @@ class Search {
         free[static_cast<std::size_t>(dofs_.axes()[k])] =
             !held_[static_cast<std::size_t>(dofs_.dof(node, k))];
       }
+      // What sloshes follows the middle of its tank, and is held upright without a support.
+      if (tower_.sloshes(node)) continue;
       for (Index axis = 0; axis < 3; ++axis) {
         if (!free[static_cast<std::size_t>(axis)]) opposed += motion.row(axis).transpose() * motion.row(axis);
       }
@@ -217,7 +236,10 @@ class Search {
     }
     for (const Vector6d& motion : rigid_motions) {
       FreeMotion body{MotionClass::body, {}};
-      for (const std::size_t node : nodes) body.parts.push_back({node, motion_at(node) * motion});
+      for (const std::size_t node : nodes) {
+        body.parts.push_back({node, motion_at(node) * motion});
+        if (tower_.sloshes(node)) body.parts.back().direction.z() = 0.0;
+      }
       add(std::move(body));
     }
   }
@@ -354,6 +376,7 @@ class Search {
 
   const Tower& tower_;
   const DofMap& dofs_;
+  const std::vector<Link>& links_;
   Triplets elongation_;
   Index rows_ = 0;
   std::vector<bool> held_;                          // n_dof: fixed or on a spring

@@ -1,5 +1,8 @@
 #include "core/mass_ledger.hpp"
 
+#include "core/ice.hpp"
+#include "core/liquid.hpp"
+
 namespace swaymark {
 
 namespace {
@@ -36,6 +39,14 @@ LedgerEntry along_bars(const Tower& tower, MassOrigin origin, const std::string&
   return collector.entry(origin, label, group ? tower.groups[*group].name : "all");
 }
 
+LedgerEntry at_nodes(const Tower& tower, MassOrigin origin, const std::string& label,
+                     const std::vector<std::size_t>& nodes, double total) {
+  Collector collector;
+  for (const std::size_t node : nodes)
+    collector.add(total / static_cast<double>(nodes.size()), tower.nodes[node].position);
+  return collector.entry(origin, label, "");
+}
+
 double mass_at_supports(const Tower& tower, const Assembly& assembly) {
   double sum = 0.0;
   const Eigen::VectorXd weights = assembly.mass_all * rigid_translation(assembly.dofs, Axis::x);
@@ -58,6 +69,10 @@ std::string_view name_of(MassOrigin origin) {
       return "linear";
     case MassOrigin::discrete:
       return "discrete";
+    case MassOrigin::ice:
+      return "ice";
+    case MassOrigin::liquid:
+      return "liquid";
   }
   return "";
 }
@@ -79,11 +94,16 @@ MassLedger mass_ledger(const Tower& tower, const Assembly& assembly) {
                                         [&](std::size_t b) { return line.per_length * bars[b].length; }));
   }
   for (const NodeMass& mass : tower.node_masses) {
-    Collector collector;
-    for (const std::size_t node : mass.nodes) {
-      collector.add(mass.total / static_cast<double>(mass.nodes.size()), tower.nodes[node].position);
-    }
-    ledger.entries.push_back(collector.entry(MassOrigin::discrete, mass.label, ""));
+    ledger.entries.push_back(at_nodes(tower, MassOrigin::discrete, mass.label, mass.nodes, mass.total));
+  }
+  for (const IceMass& ice : tower.ice) {
+    ledger.entries.push_back(along_bars(tower, MassOrigin::ice, ice.label, ice.group, [&](std::size_t b) {
+      return ice_on_bar(tower, ice, tower.bars[b], bars[b].length);
+    }));
+  }
+  for (const Liquid& liquid : tower.liquids) {
+    ledger.entries.push_back(
+        at_nodes(tower, MassOrigin::liquid, liquid.label, liquid.nodes, split_liquid(liquid).mass));
   }
   for (const LedgerEntry& entry : ledger.entries) {
     if (entry.origin != MassOrigin::bars) ledger.carried += entry.mass;

@@ -8,9 +8,9 @@
 namespace swaymark {
 
 /// Where mass comes from.
-enum class MassOrigin { bars, allowance, linear, discrete };
+enum class MassOrigin { bars, allowance, linear, discrete, ice, liquid };
 
-/// "bars", "allowance", "linear", "discrete"
+/// "bars", "allowance", "linear", "discrete", "ice", "liquid"
 [[nodiscard]] std::string_view name_of(MassOrigin origin);
 
 struct LedgerEntry {

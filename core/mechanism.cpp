@@ -237,7 +237,8 @@ MechanismReport find_mechanisms(const Tower& tower, const Assembly& assembly) {
   FreeMotions motions = find_free_motions(tower, assembly);
   report.complete = motions.complete;
   report.maxwell = {static_cast<Index>(tower.bars.size()),
-                    assembly.dofs.fixed_count() + (assembly.springs.array() > 0.0).count(),
+                    assembly.dofs.fixed_count() + (assembly.springs.array() > 0.0).count() +
+                        static_cast<Index>(assembly.links.size()),
                     assembly.dofs.dof_count()};
   if (motions.list.empty()) return report;
   report.mechanisms = Report(tower, std::move(motions)).run();

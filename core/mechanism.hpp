@@ -20,7 +20,7 @@ struct Mechanism {
 /// Maxwell's count: bars + restraints - degrees of freedom = states of self-stress - free motions.
 struct MaxwellCount {
   Index bars = 0;
-  Index restraints = 0;  ///< axes held by a support or a spring
+  Index restraints = 0;  ///< axes held by a support or a spring, or tied to others as a liquid is
   Index dofs = 0;        ///< nodes times axes
 
   [[nodiscard]] Index surplus() const { return bars + restraints - dofs; }

@@ -58,4 +58,11 @@ struct SeismicStatement {
   Place place;
 };
 
+/// How the first frequencies move where the supports give way upright: the range of stiffness of one support.
+struct BaseStudyStatement {
+  double from = 0.0;  ///< [N/m] > 0
+  double to = 0.0;    ///< [N/m] > from
+  Place place;
+};
+
 }  // namespace swaymark

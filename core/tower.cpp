@@ -1,5 +1,7 @@
 #include "core/tower.hpp"
 
+#include <algorithm>
+
 #include <fmt/format.h>
 
 namespace swaymark {
@@ -14,6 +16,11 @@ const Section& Tower::section_of(const Bar& bar) const {
 
 const Material& Tower::material_of(const Bar& bar) const {
   return materials[bar.material.value_or(groups[bar.group].material)];
+}
+
+bool Tower::sloshes(std::size_t node) const {
+  return std::any_of(liquids.begin(), liquids.end(),
+                     [&](const Liquid& liquid) { return liquid.node == node; });
 }
 
 double Tower::extent() const {

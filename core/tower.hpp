@@ -60,12 +60,21 @@ struct Bar {
   std::optional<std::size_t> material = {};  ///< likewise
 };
 
+/// A rigid rectangular footing on the ground's surface.
+struct Pad {
+  double length = 0.0;         ///< along x [m] > 0
+  double width = 0.0;          ///< along y [m] > 0
+  double shear_modulus = 0.0;  ///< of the soil, G [Pa] > 0
+  double poisson = 0.0;        ///< of the soil, 0 <= nu < 0.5
+};
+
 /// What holds one node: an axis is fixed, on a spring to the ground, or free.
 struct Support {
   std::size_t node = 0;
   std::array<bool, 3> fixed{};
   std::array<double, 3> spring{};  ///< [N/m]; 0 where there is none
   Place place;
+  std::optional<Pad> pad = {};  ///< that the springs were computed from
 };
 
 /// A carried mass shared equally by nodes (a discrete ancillary).
@@ -90,6 +99,30 @@ struct Allowance {
   double share = 0.0;                ///< fraction of the bars' own mass
   std::string label;
   Place place;
+};
+
+/// Ice all around bars, over a range of heights where one is given.
+struct IceMass {
+  std::optional<std::size_t> group;  ///< every bar where empty
+  double thickness = 0.0;            ///< t, square to the surface [m] > 0
+  double density = 0.0;              ///< [kg/m3] > 0
+  std::optional<double> from;        ///< z [m]; from the lowest node where empty
+  std::optional<double> to;          ///< z [m]; to the highest node where empty
+  std::string label;
+  Place place;
+};
+
+/// A liquid in an upright circular tank that stands on nodes.
+struct Liquid {
+  std::vector<std::size_t> nodes;
+  double radius = 0.0;   ///< of the tank, R [m] > 0
+  double depth = 0.0;    ///< of the liquid, H [m] > 0
+  double density = 0.0;  ///< [kg/m3] > 0
+  bool rigid = false;    ///< all of it moves with the nodes
+  std::string label;
+  Place place;
+  /// The tower's node that stands for the mass that sloshes, in the middle of `nodes`; none where rigid.
+  std::optional<std::size_t> node = {};
 };
 
 /// Nodes that the pattern of a lattice leaves loose, whatever else is written by hand, and what would hold
@@ -117,6 +150,8 @@ struct Tower {
   std::vector<NodeMass> node_masses;
   std::vector<LineMass> line_masses;
   std::vector<Allowance> allowances;
+  std::vector<IceMass> ice;
+  std::vector<Liquid> liquids;
   std::vector<LooseNodes> lattice_leaves_loose;  ///< of a tower written by panels
 
   MassScheme mass_scheme = MassScheme::consistent;
@@ -127,12 +162,15 @@ struct Tower {
   std::vector<BandStatement> bands;
   std::vector<SpectrumStatement> spectra;
   std::optional<SeismicStatement> seismic;
+  std::optional<BaseStudyStatement> base_study;
 
   [[nodiscard]] std::vector<Axis> axes() const { return axes_of(dimensions); }
   /// `legs-3`
   [[nodiscard]] std::string bar_name(std::size_t bar) const;
   [[nodiscard]] const Section& section_of(const Bar& bar) const;
   [[nodiscard]] const Material& material_of(const Bar& bar) const;
+  /// Whether the node stands for the sloshing mass of a liquid.
+  [[nodiscard]] bool sloshes(std::size_t node) const;
   /// The tower's extent [m]: the diagonal of the box around its nodes.
   [[nodiscard]] double extent() const;
 };

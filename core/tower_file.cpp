@@ -68,11 +68,9 @@ void refuse_later_keys(MapView& file) {
   file.refuse_later("segments_from", "bars from line segments are");
   file.refuse_later("split_crossings", "bars from line segments are");
   file.refuse_later("scenarios", "scenarios are");
-  file.refuse_later("base_study", "the study of base stiffness is");
   file.refuse_later("stabilise", "springs at loose nodes are");
   file.refuse_later("member_bending", "bending of members is");
   file.refuse_later("uncertainty", "intervals of frequency are");
-  file.refuse_later("liquid", "liquids are");
 }
 
 }  // namespace
@@ -94,6 +92,7 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   read_lattice(file, parts, groups, tower);
   read_members(file, parts, groups, tower);
   read_supports(file, parts.nodes, tower);
+  read_base_study(file, tower);
   read_masses(file, parts.nodes, groups, tower);
   read_mass_matrix(file, tower);
   read_damping(file, tower);

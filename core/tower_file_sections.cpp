@@ -1,11 +1,14 @@
 #include "core/tower_file_sections.hpp"
 
 #include <array>
+#include <cmath>
+#include <numbers>
 
 #include <fmt/format.h>
 
 #include "core/section_csv.hpp"
 #include "core/text.hpp"
+#include "core/wording_masses.hpp"
 
 namespace swaymark {
 
@@ -67,6 +70,23 @@ void read_size(const YamlNode& value, std::optional<double> gap, const SectionTa
   section.size = fmt::format("2{}", size->name);
 }
 
+// Of a section given by its area; the others know their outline.
+void read_perimeter(MapView& view, std::optional<double> area, Section& section) {
+  const YamlNode* node = view.find("perimeter");
+  if (node == nullptr) return;
+  for (const std::string_view way : {"tube", "size"}) {
+    if (!view.has(way)) continue;
+    view.faults().add(node->place, wording::keys_exclude("perimeter", way, view.owner()));
+    return;
+  }
+  section.perimeter = view.value("perimeter", Quantity::length, Range::positive);
+  if (!section.perimeter || !area) return;
+  const double least = 2.0 * std::sqrt(std::numbers::pi * *area);
+  constexpr double digits = 1e-3;  // both values may be rounded
+  if (*section.perimeter < (1.0 - digits) * least)
+    view.faults().add(node->place, wording::perimeter_too_short(*section.perimeter, least));
+}
+
 // Of the ways to say what a section is, exactly one.
 void check_ways(const MapView& view, Place place) {
   constexpr std::array<std::string_view, 3> ways{"area", "tube", "size"};
@@ -104,8 +124,11 @@ Section read_section(const std::string& name, const YamlNode& at, const YamlNode
   Section section;
   section.name = name;
   section.place = at.place;
+  const std::size_t faults_before = faults.size();
   check_ways(view, at.place);
-  section.area = view.value("area", Quantity::area, Range::positive).value_or(1.0);
+  const auto area = view.value("area", Quantity::area, Range::positive);
+  section.area = area.value_or(1.0);
+  read_perimeter(view, area, section);
   section.radius = view.value("radius", Quantity::length, Range::positive);
   if (const YamlNode* curve = view.find("curve")) {
     const std::vector<std::string> curves{"a0", "a", "b", "c", "d"};
@@ -122,6 +145,8 @@ Section read_section(const std::string& name, const YamlNode& at, const YamlNode
     read_size(*size, gap, sizes, section, faults);
   }
   view.refuse_unknown();
+  // A section with a fault is none without an outline, which ice would complain about.
+  if (faults.size() > faults_before && !section.perimeter) section.perimeter = 0.0;
   return section;
 }
 

@@ -9,4 +9,7 @@ namespace swaymark {
 /// Reads the supports into the tower: one for each node, joined from all entries that name it.
 void read_supports(MapView& file, const NameTable& nodes, Tower& tower);
 
+/// The key `base_study`, once the supports are known.
+void read_base_study(MapView& file, Tower& tower);
+
 }  // namespace swaymark

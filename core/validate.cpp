@@ -43,6 +43,7 @@ void find_coincident_nodes(const Tower& tower, FaultList& faults) {
   std::map<Cell, std::vector<std::size_t>> grid;  // each node in every cell it is near to
   for (std::size_t i = 0; i < tower.nodes.size(); ++i) {
     const Node& node = tower.nodes[i];
+    if (tower.sloshes(i)) continue;  // it stands in the middle of its tank, whatever else stands there
     const auto cells = cells_near(node.position);
     const Node* first = nullptr;
     for (const Cell& cell : cells) {

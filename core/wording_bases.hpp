@@ -1,0 +1,19 @@
+#pragma once
+
+#include <string_view>
+
+#include "core/error.hpp"
+
+/// What is wrong with pads and with the study of the base.
+namespace swaymark::wording {
+
+[[nodiscard]] Message pad_in_one_dimension();
+[[nodiscard]] Message pad_beside(std::string_view key);
+[[nodiscard]] Message pad_too_slender(double ratio, double limit);
+[[nodiscard]] Message pad_without_stiffness();
+[[nodiscard]] Message poisson_out_of_range(double value);
+[[nodiscard]] Message study_is_a_range(std::string_view came);
+[[nodiscard]] Message study_reversed(double from, double to);
+[[nodiscard]] Message study_of_nothing(std::string_view axis);
+
+}  // namespace swaymark::wording
