@@ -63,9 +63,18 @@ Eigen::MatrixXd motion_of(const DofMap& dofs, std::size_t nodes, const Eigen::Ve
   return motion;
 }
 
-// "local at 7, 9" where few nodes of a larger tower hold nearly all of the motion; else the motion of the
+// "liquid" where more than half of the motion is sloshing, "local at 7, 9" where few nodes of a larger tower hold nearly all of the motion; else the motion of the
 // levels.
-std::string character(const Tower& tower, const NodeCloud& cloud, const Eigen::MatrixXd& motion) {
+std::string character(const Tower& tower, NodeCloud cloud, const Eigen::MatrixXd& motion) {
+  const Eigen::VectorXd energy = cloud.masses.array() * motion.rowwise().squaredNorm().array();
+  double sloshing = 0.0;
+  for (const Liquid& liquid : tower.liquids) {
+    if (!liquid.node) continue;
+    const auto node = static_cast<Index>(*liquid.node);
+    sloshing += energy(node);
+    cloud.masses(node) = 0.0;  // where it hangs back, the level it belongs to has not changed its shape
+  }
+  if (sloshing > 0.5 * energy.sum()) return "liquid";
   const auto nodes = energy_nodes(cloud, motion);
   const auto moving = (cloud.masses.array() > 0.0).count();
   if (moving >= 10 && nodes.size() <= 2) {
@@ -158,6 +167,7 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
                     {},
                     {},
                     {},
+                    {},
                     {}};
   if (analysis.mechanisms.any()) return analysis;
   const SparseMatrix& stiffness = analysis.assembly.stiffness;
@@ -186,6 +196,8 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
       analysis.seismic =
           seismic_analysis(analysis.tower, analysis.assembly, problem, analysis.set, analysis.damping);
     }
+    if (analysis.tower.base_study)
+      analysis.base_study = study_base(analysis.tower, analysis.assembly, problem);
   }
   require_finite(analysis);
   analysis.verdicts = verdicts_of(analysis);

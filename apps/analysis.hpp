@@ -4,6 +4,7 @@
 #include <string>
 #include <vector>
 
+#include "apps/base_study.hpp"
 #include "apps/provenance.hpp"
 #include "apps/verdicts.hpp"
 #include "core/mass_ledger.hpp"
@@ -37,6 +38,7 @@ struct Analysis {
   std::vector<std::string> character;  ///< n_modes
   std::vector<BandResult> bands;       ///< as tower.bands
   std::optional<SeismicResult> seismic;
+  std::optional<BaseStudy> base_study;
 
   std::vector<Verdict> verdicts;
   std::vector<std::string> notes;

@@ -5,6 +5,7 @@
 
 #include <fmt/format.h>
 
+#include "core/liquid.hpp"
 #include "core/quantity.hpp"
 
 namespace swaymark {
@@ -91,14 +92,58 @@ void about_masses(const Analysis& analysis, double height, Notes& notes) {
   }
 }
 
+std::string with_label(std::string_view what, const std::string& label) {
+  return label.empty() ? std::string(what) : fmt::format("{} '{}'", what, label);
+}
+
+void about_ice(const Tower& tower, Notes& notes) {
+  for (const IceMass& ice : tower.ice) {
+    if (!within(ice.thickness, 0.002, 0.150)) {
+      notes.push_back(fmt::format("Plausible? {} is {:.4g} mm thick; a bare number is in m.",
+                                  with_label("Ice", ice.label), 1e3 * ice.thickness));
+    }
+    if (!within(ice.density, 200.0, 920.0)) {
+      notes.push_back(fmt::format("Plausible? {} has {:.4g} kg/m3; rime has 200 to 900 and glaze 900.",
+                                  with_label("Ice", ice.label), ice.density));
+    }
+  }
+}
+
+void about_liquids(const Tower& tower, Notes& notes) {
+  for (const Liquid& liquid : tower.liquids) {
+    const std::string name = with_label("Liquid", liquid.label);
+    if (!within(liquid.density, 500.0, 2000.0))
+      notes.push_back(fmt::format("Plausible? {} has {:.4g} kg/m3; water has 1000.", name, liquid.density));
+    const double mass = split_liquid(liquid).mass;
+    for (const NodeMass& other : tower.node_masses) {
+      if (std::abs(other.total / mass - 1.0) > 0.01) continue;
+      notes.push_back(fmt::format("Plausible? {} weighs as much as {} of {:.4g} kg: is it counted twice?", name,
+                                  with_label("the mass", other.label), other.total));
+    }
+  }
+}
+
+void about_soil(const Tower& tower, Notes& notes) {
+  for (const Support& support : tower.supports) {
+    if (!support.pad || within(support.pad->shear_modulus, 1e6, 10e9)) continue;
+    notes.push_back(fmt::format("Plausible? The soil under node '{}' has G = {:.4g} Pa; a bare number is in Pa.",
+                                tower.nodes[support.node].name, support.pad->shear_modulus));
+    return;
+  }
+}
+
 void about_frequency(const Analysis& analysis, double height, Notes& notes) {
   if (height <= 0.0 || analysis.mode_count() == 0) return;
   const double low = 10.0 / height;
   const double high = 300.0 / height;
-  if (within(analysis.frequency(0), low, high)) return;
+  Index first = 0;  // of the tower itself: liquids slosh below it
+  while (analysis.character[static_cast<std::size_t>(first)] == "liquid") {
+    if (++first == analysis.mode_count()) return;
+  }
+  if (within(analysis.frequency(first), low, high)) return;
   notes.push_back(
-      fmt::format("Plausible? f1 = {:.4g} Hz; lattice towers {:.4g} m high mostly have {:.2g} to {:.2g} Hz.",
-                  analysis.frequency(0), height, low, high));
+      fmt::format("Plausible? f{} = {:.4g} Hz; lattice towers {:.4g} m high mostly have {:.2g} to {:.2g} Hz.",
+                  first + 1, analysis.frequency(first), height, low, high));
 }
 
 }  // namespace
@@ -110,6 +155,9 @@ std::vector<std::string> plausibility_notes(const Analysis& analysis) {
   about_units(analysis.tower, notes);
   about_lengths(analysis, height, notes);
   about_masses(analysis, height, notes);
+  about_ice(analysis.tower, notes);
+  about_liquids(analysis.tower, notes);
+  about_soil(analysis.tower, notes);
   about_frequency(analysis, height, notes);
   return notes;
 }

@@ -1,5 +1,6 @@
 #include "apps/report_csv.hpp"
 
+#include <algorithm>
 #include <cmath>
 
 #include <fmt/format.h>
@@ -185,6 +186,24 @@ NamedText reactions_sheet(const Analysis& a) {
   return sheet.take();
 }
 
+// An empty stiffness is that of a rigid support.
+NamedText base_study_sheet(const Analysis& a) {
+  std::size_t most = 0;
+  for (const BaseStudy::Row& row : a.base_study->rows) most = std::max(most, row.frequencies.size());
+  Sheet sheet("base_study", {"stiffness [N/m]"});
+  for (std::size_t j = 0; j < most; ++j) sheet.add(fmt::format("frequency {} [Hz]", j + 1));
+  sheet.add("bound [Hz]");
+  sheet.end_row();
+  for (const BaseStudy::Row& row : a.base_study->rows) {
+    sheet.add(row.stiffness);
+    for (std::size_t j = 0; j < most; ++j)
+      sheet.add(j < row.frequencies.size() ? std::optional<double>(row.frequencies[j]) : std::nullopt);
+    sheet.add(row.bound);
+    sheet.end_row();
+  }
+  return sheet.take();
+}
+
 NamedText verdicts_sheet(const Analysis& a) {
   Sheet sheet("verdicts", {"check", "met", "detail"});
   sheet.end_row();
@@ -222,6 +241,7 @@ std::vector<NamedText> csv_report(const Analysis& a, bool shapes) {
     for (const auto sheet : {ordinates_sheet, base_sheet, bars_sheet, nodes_sheet, reactions_sheet})
       sheets.push_back(sheet(a));
   }
+  if (a.base_study) sheets.push_back(base_study_sheet(a));
   if (a.scope == Scope::check) sheets.push_back(verdicts_sheet(a));
   if (shapes) sheets.push_back(shapes_sheet(a));
   return sheets;

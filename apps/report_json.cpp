@@ -6,6 +6,7 @@
 #include <nlohmann/json.hpp>
 
 #include "apps/report_parts.hpp"
+#include "core/liquid.hpp"
 
 namespace swaymark {
 
@@ -43,6 +44,21 @@ Json mode_numbers(const std::vector<Index>& modes) {
   return list;
 }
 
+Json liquids(const Tower& tower) {
+  Json list = Json::array();
+  for (const Liquid& liquid : tower.liquids) {
+    const LiquidSplit split = split_liquid(liquid);
+    Json row{{"label", liquid.label}, {"mass", split.mass}, {"impulsive", split.impulsive}};
+    if (!liquid.rigid) {
+      row["convective"] = split.convective;
+      row["spring"] = split.spring;
+      row["frequency"] = split.omega / (2.0 * std::numbers::pi);
+    }
+    list.push_back(std::move(row));
+  }
+  return list;
+}
+
 Json mass(const Analysis& a) {
   Json object{{"bars", a.ledger.bars}, {"carried", a.ledger.carried}, {"total", a.ledger.total()}};
   if (a.set.moving.size() > 0) object["moving"] = by_place(a.tower, a.set.moving);
@@ -57,6 +73,7 @@ Json mass(const Analysis& a) {
     entries.push_back(std::move(row));
   }
   object["ledger"] = std::move(entries);
+  if (!a.tower.liquids.empty()) object["liquids"] = liquids(a.tower);
   return object;
 }
 
@@ -169,6 +186,18 @@ Json seismic(const Analysis& a) {
   return object;
 }
 
+Json base_study(const BaseStudy& study) {
+  Json list = Json::array();
+  for (const BaseStudy::Row& row : study.rows) {
+    Json item = Json::object();
+    if (row.stiffness) item["stiffness"] = *row.stiffness;
+    item["frequencies"] = row.frequencies;
+    if (row.bound) item["bound"] = *row.bound;
+    list.push_back(std::move(item));
+  }
+  return list;
+}
+
 Json verdicts(const Analysis& a) {
   Json list = Json::array();
   for (const Verdict& verdict : a.verdicts) {
@@ -208,7 +237,7 @@ std::string json_report(const Analysis& a, bool shapes) {
   Json root{{"swaymark", a.provenance.version}, {"title", a.tower.title}};
   root["input"] = {{"file", a.provenance.file}, {"sha256", a.provenance.sha256}, {"date", a.provenance.date}};
   root["model"] = {{"dimensions", a.tower.dimensions},
-                   {"nodes", a.tower.nodes.size()},
+                   {"nodes", stated_nodes(a.tower)},
                    {"bars", a.tower.bars.size()},
                    {"free_dofs", a.assembly.dofs.free_count()}};
   root["mass"] = mass(a);
@@ -220,6 +249,7 @@ std::string json_report(const Analysis& a, bool shapes) {
     root["completeness"] = completeness(a.set.modes);
     if (!a.bands.empty()) root["bands"] = bands(a);
     if (a.seismic) root["seismic"] = seismic(a);
+    if (a.base_study) root["base_study"] = base_study(*a.base_study);
     if (a.scope == Scope::check) root["verdicts"] = verdicts(a);
   }
   root["notes"] = a.notes;

@@ -8,6 +8,8 @@
 #include <fmt/format.h>
 
 #include "apps/figure.hpp"
+#include "apps/report_base.hpp"
+#include "apps/report_parts.hpp"
 #include "apps/table.hpp"
 #include "core/quantity.hpp"
 
@@ -88,6 +90,7 @@ std::string held_words(const Tower& tower, const Support& support) {
   }
   std::string words = fixed.empty() ? "" : "fixed" + fixed;
   if (!springs.empty()) words += (words.empty() ? "springs" : "; springs") + springs;
+  if (support.pad) words += " from " + pad_words(*support.pad);
   return words;
 }
 
@@ -133,11 +136,12 @@ std::string model_section(const Analysis& a) {
   const Tower& tower = a.tower;
   std::string out = section_head("MODEL");
   out += wrapped(fmt::format("{} dimension{}, {} nodes, {} bars, {} free degrees of freedom, {} mass matrix",
-                             tower.dimensions, tower.dimensions == 1 ? "" : "s", tower.nodes.size(),
+                             tower.dimensions, tower.dimensions == 1 ? "" : "s", stated_nodes(tower),
                              tower.bars.size(), a.assembly.dofs.free_count(), name_of(tower.mass_scheme)),
                  "  ", kTextWidth);
   out += wrapped("Extent: " + extent_words(tower), "  ", kTextWidth);
   out += supports_text(tower);
+  out += liquids_text(tower);
   if (a.scope == Scope::check) {
     for (std::size_t s = 0; s < tower.spectra.size(); ++s) {
       const bool used =

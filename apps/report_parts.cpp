@@ -29,6 +29,12 @@ std::string bar_ends(const Tower& tower, std::size_t bar) {
                      tower.nodes[tower.bars[bar].to].name);
 }
 
+std::size_t stated_nodes(const Tower& tower) {
+  const auto sloshing = std::count_if(tower.liquids.begin(), tower.liquids.end(),
+                                      [](const Liquid& liquid) { return liquid.node.has_value(); });
+  return tower.nodes.size() - static_cast<std::size_t>(sloshing);
+}
+
 Extremes bar_extremes(double gravity, double seismic) {
   return {std::max(0.0, gravity + seismic), std::max(0.0, seismic - gravity)};
 }

@@ -20,6 +20,9 @@ namespace swaymark {
 /// "5 to 9": the nodes a bar joins.
 [[nodiscard]] std::string bar_ends(const Tower& tower, std::size_t bar);
 
+/// How many nodes the tower file states; those of sloshing masses are none of them.
+[[nodiscard]] std::size_t stated_nodes(const Tower& tower);
+
 /// Largest tension and largest compression of gravity +/- seismic [N], each >= 0.
 struct Extremes {
   double tension = 0.0;

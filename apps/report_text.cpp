@@ -6,6 +6,7 @@
 #include <fmt/format.h>
 
 #include "apps/figure.hpp"
+#include "apps/report_base.hpp"
 #include "apps/report_model.hpp"
 #include "apps/report_parts.hpp"
 #include "apps/report_seismic.hpp"
@@ -31,6 +32,7 @@ class TextReport {
     if (a_.scope == Scope::check) {
       bands();
       if (a_.seismic) out_ += seismic_section(a_);
+      if (a_.base_study) out_ += base_study_section(a_);
       checks();
     }
     notes();

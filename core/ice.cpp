@@ -35,7 +35,7 @@ double iced_share(const Tower& tower, const IceMass& ice, const Bar& bar) {
   if (high - low > kLevel * (b - a).norm()) {
     return std::max(0.0, std::min(high, to) - std::max(low, from)) / (high - low);
   }
-  if (from <= low && from <= lowest_height(tower)) from = -open;
+  if (from == low && from <= lowest_height(tower)) from = -open;
   return from < low && low <= to ? 1.0 : 0.0;
 }
 

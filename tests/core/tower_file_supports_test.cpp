@@ -60,7 +60,7 @@ TEST_CASE("an axis the tower does not have cannot be held") {
 
 TEST_CASE("a support must hold something somewhere") {
   CHECK(refusals_with("supports: [{nodes: [a, b]}]") ==
-        Refusals{"7:12 a support needs 'fixed' or 'springs'"});
+        Refusals{"7:12 a support needs 'fixed', 'springs' or 'pad'"});
   CHECK(refusals_with("supports: [{fixed: [x]}]") == Refusals{"7:12 'nodes' is missing in a support"});
   CHECK(refusals_with("supports: [{nodes: [], fixed: [x]}]") == Refusals{"7:20 'nodes' lists nothing"});
   CHECK(refusals_with("supports: [{nodes: [a, b], fixed: []}]") == Refusals{"7:35 'fixed' lists nothing"});
