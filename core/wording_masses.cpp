@@ -7,14 +7,16 @@
 namespace swaymark::wording {
 
 Message perimeter_too_short(double perimeter, double least) {
-  return {fmt::format("a perimeter of {:.4g} m cannot enclose the area: a circle of it has {:.4g} m",
-                      perimeter, least),
+  return {fmt::format("a perimeter of {:.4g} m cannot enclose the area: a circle of it has {:.4g} m", perimeter,
+                      least),
           "check both values and their units"};
 }
 Message perimeter_missing(const std::vector<std::string>& sections) {
+  constexpr std::size_t most = 3;
   std::string names;
-  for (const std::string& section : sections)
-    names += fmt::format("{}'{}'", names.empty() ? "" : ", ", excerpt(section));
+  for (std::size_t i = 0; i < sections.size() && i < most; ++i)
+    names += fmt::format("{}'{}'", names.empty() ? "" : ", ", excerpt(sections[i]));
+  if (sections.size() > most) names += fmt::format(" and {} more", sections.size() - most);
   return {fmt::format("ice needs the outline of its bars, and no perimeter is known of section{} {}",
                       sections.size() == 1 ? "" : "s", names),
           "add for example 'perimeter: 0.6 m' there, or give the section by 'size' or 'tube'"};
@@ -39,9 +41,8 @@ Message liquid_needs_label() {
   return {"the mass that sloshes has no name in the results", "add for example 'label: water'"};
 }
 Message liquid_label_taken(std::string_view label) {
-  return {fmt::format(
-              "the mass that sloshes takes its name from the label, and '{}' names something else already",
-              excerpt(label)),
+  return {fmt::format("the mass that sloshes takes its name from the label, and '{}' names something else already",
+                      excerpt(label)),
           "choose another label"};
 }
 Message liquid_without_mass() {

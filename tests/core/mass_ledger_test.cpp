@@ -1,5 +1,7 @@
 #include "core/mass_ledger.hpp"
 
+#include <numbers>
+
 #include "tests/support/matchers.hpp"
 #include "tests/support/towers.hpp"
 
@@ -95,11 +97,28 @@ TEST_CASE("a tower without mass has a ledger of zeros") {
   CHECK(ledger.entries[0].centre == Eigen::Vector3d::Zero());
 }
 
+TEST_CASE("ice and liquids have entries of their own") {
+  Tower tower = two_groups();
+  tower.sections[0].perimeter = 0.4;
+  tower.ice.push_back({std::size_t{1}, 0.02, 900.0, std::nullopt, 1.0, "glaze", {}});
+  tower.liquids.push_back({{1, 2}, 1.0, 2.0, 1000.0, true, "oil", {}, {}});
+  const MassLedger ledger = mass_ledger(tower, assemble(tower));
+  REQUIRE(ledger.entries.size() == 7);
+  // Half of the post lies below z = 1; the ice is spread over all of it.
+  const double ice = 900.0 * (0.4 * 0.02 + std::numbers::pi * 0.02 * 0.02);
+  check_entry(ledger.entries[5], MassOrigin::ice, "glaze", "post", ice, {4.0, 0.0, 1.0});
+  const double oil = 1000.0 * std::numbers::pi * 2.0;
+  check_entry(ledger.entries[6], MassOrigin::liquid, "oil", "", oil, {4.0, 0.0, 1.0});
+  CHECK_THAT(ledger.carried, is_near(0.6 * 7.850 + 110.0 + ice + oil, kRoundoff));
+}
+
 TEST_CASE("origins carry the names of the results") {
   CHECK(name_of(MassOrigin::bars) == "bars");
   CHECK(name_of(MassOrigin::allowance) == "allowance");
   CHECK(name_of(MassOrigin::linear) == "linear");
   CHECK(name_of(MassOrigin::discrete) == "discrete");
+  CHECK(name_of(MassOrigin::ice) == "ice");
+  CHECK(name_of(MassOrigin::liquid) == "liquid");
 }
 
 }  // namespace swaymark::test

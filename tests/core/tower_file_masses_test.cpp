@@ -28,7 +28,7 @@ TEST_CASE("masses along bars belong to a group or to all") {
 }
 
 TEST_CASE("an entry carries mass in exactly one way") {
-  const std::string one = "needs exactly one of 'mass', 'per_length' and 'allowance'";
+  const std::string one = "needs exactly one of 'mass', 'per_length', 'allowance', 'ice' and 'liquid'";
   CHECK(refusals_with("masses: [{nodes: [c]}]") == Refusals{"8:10 a mass " + one});
   CHECK(refusals_with("masses: [{group: g, per_length: 1, allowance: 1 %}]") ==
         Refusals{"8:10 a mass " + one});
@@ -66,11 +66,74 @@ TEST_CASE("masses at unknown places are refused where they name them") {
   CHECK(refusals_with("masses: 5 kg") == Refusals{"8:9 'masses' wants a list of masses, got '5 kg'"});
 }
 
-TEST_CASE("masses of a later version are the only fault of their entry") {
+namespace {
+
+const std::string kOutlined = "sections: {bar: {area: 10 cm2, perimeter: 0.4 m}}";
+const std::string kWater = "liquid: {radius: 1.9 m, depth: 3.5 m, density: 1000 kg/m3}";
+
+}  // namespace
+
+TEST_CASE("ice lies on the bars of a group over a range of heights") {
+  const Tower tower = tower_of(tower_with(
+      {kOutlined, "masses: [{group: g, ice: 20 mm, density: 900 kg/m3, from: 0.2 m, to: 3 m, label: glaze}, "
+                  "{group: all, ice: 0.01, density: 500}]"}));
+  REQUIRE(tower.ice.size() == 2);
+  CHECK(tower.ice[0].group == std::size_t{0});
+  CHECK_THAT(tower.ice[0].thickness, is_near(0.02, kRoundoff));
+  CHECK(tower.ice[0].density == 900.0);
+  CHECK(tower.ice[0].from == 0.2);
+  CHECK(tower.ice[0].to == 3.0);
+  CHECK(tower.ice[0].label == "glaze");
+  CHECK(tower.ice[1].group == std::nullopt);
+  CHECK(tower.ice[1].from == std::nullopt);
+}
+
+TEST_CASE("ice names every section whose outline is not known") {
   CHECK(refusals_with("masses: [{group: all, ice: 20 mm, density: 900 kg/m3}]") ==
-        Refusals{"8:23 'ice': ice on the bars is not yet supported"});
-  CHECK(refusals_with("masses: [{group: all, liquid: water}]") ==
-        Refusals{"8:23 'liquid': liquids are not yet supported"});
+        Refusals{"8:10 ice needs the outline of its bars, and no perimeter is known of section 'bar'"});
+  // A section with a fault of its own is not blamed again.
+  CHECK(refusals_of(tower_with({"sections: {bar: {area: 0}}",
+                                "masses: [{group: all, ice: 20 mm, density: 900 kg/m3}]"})) ==
+        Refusals{"4:24 'area' must be above zero, got '0'"});
+}
+
+TEST_CASE("heights belong to ice alone") {
+  CHECK(refusals_with("masses: [{group: g, per_length: 5, from: 0.2 m}]") ==
+        Refusals{"8:36 unknown key 'from' in a mass"});
+  CHECK(refusals_of(tower_with({kOutlined, "masses: [{group: g, ice: 5 mm, density: 900, to: -1 m}]"})) ==
+        Refusals{"8:10 no bar of 'g' lies within these heights"});
+}
+
+TEST_CASE("a liquid adds a node for what sloshes in the middle of its own") {
+  const Tower tower = tower_of(tower_with({"masses: [{nodes: [a, c], " + kWater + ", label: water}]"}));
+  REQUIRE(tower.liquids.size() == 1);
+  const Liquid& liquid = tower.liquids[0];
+  CHECK(liquid.nodes == std::vector<std::size_t>{0, 2});
+  CHECK(liquid.radius == 1.9);
+  CHECK(liquid.depth == 3.5);
+  CHECK(liquid.density == 1000.0);
+  REQUIRE(liquid.node == std::size_t{3});
+  CHECK(tower.nodes[3].name == "water");
+  CHECK((tower.nodes[3].position - Eigen::Vector3d(0.5, 0.0, 0.5)).norm() <= kRoundoff);
+  CHECK(tower.sloshes(3));
+  CHECK_FALSE(tower.sloshes(2));
+}
+
+TEST_CASE("what sloshes may stand where a node stands and a rigid liquid adds none") {
+  CHECK(tower_of(tower_with({"masses: [{nodes: [c], " + kWater + ", label: water}]"})).nodes.size() == 4);
+  const Tower rigid = tower_of(tower_with(
+      {"masses: [{nodes: [c], liquid: {radius: 1.9, depth: 3.5, density: 1000, rigid: true}}]"}));
+  CHECK(rigid.nodes.size() == 3);
+  CHECK(rigid.liquids.at(0).rigid);
+}
+
+TEST_CASE("two liquids have different labels and no bar ends at one") {
+  CHECK(refusals_with("masses: [{nodes: [c], " + kWater + ", label: w}, {nodes: [a], " + kWater +
+                      ", label: w}]") ==
+        Refusals{"8:94 the mass that sloshes takes its name from the label, and 'w' names something else "
+                 "already"});
+  CHECK(refusals_with("masses: [{nodes: [c], " + kWater + ", label: w}, {nodes: [w], mass: 5}]") ==
+        Refusals{"8:103 there is no node 'w'"});
 }
 
 TEST_CASE("the mass matrix is consistent unless another scheme is named") {

@@ -147,4 +147,19 @@ TEST_CASE("a table is refused where no other file can be reached and where it is
         Refusals{"8:16 'sections_from' wants a word, got a list"});
 }
 
+TEST_CASE("a section by area may state its perimeter") {
+  CHECK(section_of("{area: 10 cm2, perimeter: 400 mm}").perimeter == 0.4);
+  CHECK(refusals_of_section("{area: 10 cm2, perimeter: 0}") ==
+        Refusals{"4:43 'perimeter' must be above zero, got '0'"});
+  CHECK(refusals_of_section("{tube: [60 mm, 5 mm], perimeter: 0.2 m}") ==
+        Refusals{"4:50 'perimeter' and 'tube' exclude each other in section 'bar'"});
+}
+
+TEST_CASE("no perimeter is shorter than that of a circle of the same area") {
+  // Isoperimetric inequality: p >= 2 sqrt(pi A); a circle of 112.1 mm encloses 10 cm2. Derived.
+  CHECK(refusals_of_section("{area: 10 cm2, perimeter: 112.2 mm}").empty());
+  CHECK(refusals_of_section("{area: 10 cm2, perimeter: 111.5 mm}") ==
+        Refusals{"4:43 a perimeter of 0.1115 m cannot enclose the area: a circle of it has 0.1121 m"});
+}
+
 }  // namespace swaymark::test

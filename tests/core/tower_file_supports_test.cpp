@@ -1,5 +1,7 @@
 #include "core/tower_file_supports.hpp"
 
+#include "core/pad.hpp"
+
 #include "tests/core/tower_text.hpp"
 #include "tests/support/matchers.hpp"
 
@@ -76,9 +78,41 @@ TEST_CASE("a spring is a stiffness above zero") {
         Refusals{"7:41 'x': a stiffness was wanted, got '5 kN', which is a force"});
 }
 
-TEST_CASE("a pad of a later version is the only fault of its support") {
+TEST_CASE("a pad becomes springs along every axis of each of its nodes") {
+  const Tower tower = tower_of(tower_with(
+      {"supports: [{nodes: [a, b], pad: {length: 3 m, width: 2 m, shear_modulus: 60 MPa, poisson: 0.3}}]"}));
+  const PadSprings springs = pad_springs({3.0, 2.0, 60e6, 0.3});
+  REQUIRE(tower.supports.size() == 2);
+  for (const Support& support : tower.supports) {
+    CHECK(support.fixed == std::array{false, false, false});
+    CHECK(support.spring == std::array{springs.x, 0.0, springs.z});  // the small tower has no y
+    REQUIRE(support.pad.has_value());
+    CHECK(support.pad->length == 3.0);
+  }
+}
+
+TEST_CASE("a pad states its soil and holds every axis itself") {
   CHECK(refusals_with("supports: [{nodes: [a, b], pad: {width: 2 m}}]") ==
-        Refusals{"7:28 'pad': springs from a pad and its soil are not yet supported"});
+        Refusals{"7:33 'length' is missing in 'pad'", "7:33 'shear_modulus' is missing in 'pad'",
+                 "7:33 'poisson' is missing in 'pad'"});
+  const std::string pad = "pad: {length: 2 m, width: 2 m, shear_modulus: 60 MPa, poisson: 30 %}";
+  CHECK(refusals_with("supports: [{nodes: [a, b], springs: {x: 1}, " + pad + "}]") ==
+        Refusals{"7:12 'springs' stands beside 'pad', which holds every axis of its nodes already"});
+  CHECK(refusals_with("supports: [{nodes: [a, b], " + pad + "}, {nodes: [b], fixed: [z]}]") ==
+        Refusals{"7:99 node 'b' is held twice along z, first in line 7"});
+}
+
+TEST_CASE("a base study is a range of stiffness for supports that are fixed upright") {
+  const Tower tower = tower_of(tower_with({"base_study: [20 kN/mm, 1000 kN/mm]"}));
+  REQUIRE(tower.base_study.has_value());
+  CHECK_THAT(tower.base_study->from, is_near(20e6, kRoundoff));
+  CHECK_THAT(tower.base_study->to, is_near(1e9, kRoundoff));
+  CHECK_FALSE(tower_of(tower_with({})).base_study.has_value());
+  CHECK(refusals_with("base_study: 20 kN/mm") ==
+        Refusals{"8:13 'base_study' wants two stiffnesses, got '20 kN/mm'"});
+  CHECK(refusals_with("base_study: [0, 5]") == Refusals{"8:14 'base_study' must be above zero, got '0'"});
+  CHECK(refusals_with("base_study: [5, 5]") ==
+        Refusals{"8:13 the range ends at 5 N/m, not above its begin at 5 N/m"});
 }
 
 }  // namespace swaymark::test

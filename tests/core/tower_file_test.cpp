@@ -90,11 +90,9 @@ TEST_CASE("every key of a later version is refused at its line") {
                                        "segments_from: lines.csv",
                                        "split_crossings: true",
                                        "scenarios: [{label: iced}]",
-                                       "base_study: {}",
                                        "stabilise: 1",
                                        "member_bending: true",
-                                       "uncertainty: {}",
-                                       "liquid: {}"};
+                                       "uncertainty: {}"};
   for (const std::string& line : lines) {
     const Refusals refusals = refusals_with(line);
     INFO(line);
