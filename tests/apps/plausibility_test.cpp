@@ -70,6 +70,45 @@ TEST_CASE("a frequency far from what towers of that height have is asked about")
   CHECK(!asks(harbour_light(), "lattice towers"));
 }
 
+TEST_CASE("ice in metres without the unit and ice of stone are asked about") {
+  const std::string outlined = "sections: {bar: {area: 10 cm2, perimeter: 0.4 m}}";
+  const auto iced = [&](const std::string& ice) {
+    return checked(tower_with({outlined, "masses: [{group: g, " + ice + ", label: glaze}]"}));
+  };
+  CHECK(asks(iced("ice: 2, density: 900"), "Ice 'glaze' is 2000 mm thick"));
+  CHECK(asks(iced("ice: 20 mm, density: 2600"), "Ice 'glaze' has 2600 kg/m3"));
+  CHECK(!asks(iced("ice: 20 mm, density: 900"), "Ice"));
+}
+
+TEST_CASE("a liquid that is no liquid and one that is carried twice are asked about") {
+  const auto tank = [&](const std::string& density, const std::string& mass) {
+    return checked(tower_with({"masses: [{nodes: [c], liquid: {radius: 1 m, depth: 1 m, density: " + density +
+                               "}, label: water}, {nodes: [c], mass: " + mass + "}]"}));
+  };
+  CHECK(asks(tank("1", "100 kg"), "Liquid 'water' has 1 kg/m3"));
+  // pi t of water.
+  CHECK(asks(tank("1000", "3142 kg"), "Liquid 'water' weighs as much as the mass of 3142 kg"));
+  CHECK(!asks(tank("1000", "1000 kg"), "Liquid"));
+}
+
+TEST_CASE("soil softer than any and harder than rock is asked about") {
+  const auto pad = [&](const std::string& modulus) {
+    return checked(tower_with({"supports: [{nodes: [a, b], pad: {length: 2, width: 2, poisson: 0.3, shear_modulus: " +
+                               modulus + "}}]"}));
+  };
+  CHECK(asks(pad("60"), "G = 60 Pa"));
+  CHECK(asks(pad("60 GPa"), "under node 'a'"));
+  CHECK(!asks(pad("60 MPa"), "soil"));
+}
+
+TEST_CASE("sloshing below the range of towers is not asked about") {
+  const std::string tank = "masses: [{nodes: [c], liquid: {radius: 1 m, depth: 1 m, density: 1000}, label: water}]";
+  const Analysis analysis = checked(tower_with({tank, "modes: {count: 3}"}));
+  REQUIRE(analysis.frequency(0) < 1.0);  // a meter of height: common are 10 to 300 Hz
+  REQUIRE(analysis.character.front() == "liquid");
+  CHECK(!asks(analysis, "lattice towers"));
+}
+
 TEST_CASE("a rod is not asked about heights") {
   for (const std::string& note : plausibility_notes(checked(shaken_rod(1)))) {
     CHECK(note.find("high") == std::string::npos);

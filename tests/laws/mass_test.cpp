@@ -18,6 +18,10 @@ Tower loaded(MassScheme scheme) {
   Allowance bolts;
   bolts.share = 0.05;
   tower.allowances.push_back(bolts);
+  tower.sections.front().perimeter = 0.3;
+  tower.ice.push_back({std::nullopt, 0.03, 900.0, 1.0, 4.5, "glaze", {}});
+  const std::size_t last = tower.nodes.size() - 1;
+  stand_tank(tower, {last, last - 1}, 0.8, 1.1);
   return tower;
 }
 

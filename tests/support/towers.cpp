@@ -53,6 +53,24 @@ void carry(Tower& tower, std::size_t node, double mass) {
   tower.node_masses.push_back({{node}, mass, "", {}});
 }
 
+void stand_tank(Tower& tower, const std::vector<std::size_t>& nodes, double radius, double depth,
+                bool rigid) {
+  Liquid liquid;
+  liquid.nodes = nodes;
+  liquid.radius = radius;
+  liquid.depth = depth;
+  liquid.density = 1000.0;
+  liquid.rigid = rigid;
+  liquid.label = "water";
+  if (!rigid) {
+    Eigen::Vector3d middle = Eigen::Vector3d::Zero();
+    for (const std::size_t node : nodes) middle += tower.nodes[node].position;
+    liquid.node = tower.nodes.size();
+    tower.nodes.push_back({liquid.label, middle / static_cast<double>(nodes.size()), {}});
+  }
+  tower.liquids.push_back(std::move(liquid));
+}
+
 Tower rod(int elements, double length, MassScheme scheme) {
   Tower tower = bare_tower(1);
   tower.mass_scheme = scheme;

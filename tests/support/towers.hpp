@@ -19,6 +19,10 @@ void fix(Tower& tower, std::size_t node);
 /// Carries a mass [kg] at the node.
 void carry(Tower& tower, std::size_t node, double mass);
 
+/// Stands a tank of water, named "water", on the nodes. \param radius, depth [m]
+void stand_tank(Tower& tower, const std::vector<std::size_t>& nodes, double radius, double depth,
+                bool rigid = false);
+
 /// A fixed-free rod along x of equal elements. \param length [m]
 [[nodiscard]] Tower rod(int elements, double length, MassScheme scheme);
 
