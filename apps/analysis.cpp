@@ -63,8 +63,8 @@ Eigen::MatrixXd motion_of(const DofMap& dofs, std::size_t nodes, const Eigen::Ve
   return motion;
 }
 
-// "liquid" where more than half of the motion is sloshing, "local at 7, 9" where few nodes of a larger tower hold nearly all of the motion; else the motion of the
-// levels.
+// "liquid" where more than half of the motion is sloshing, "local at 7, 9" where few nodes of a larger tower
+// hold nearly all of the motion; else the motion of the levels.
 std::string character(const Tower& tower, NodeCloud cloud, const Eigen::MatrixXd& motion) {
   const Eigen::VectorXd energy = cloud.masses.array() * motion.rowwise().squaredNorm().array();
   double sloshing = 0.0;

@@ -54,7 +54,9 @@ double mass_on_support(const Tower& tower, const Assembly& assembly, const Facto
   Eigen::MatrixXd shapes = assembly.dofs.expand(stiffness.solve(pull));
   for (Index s = 0; s < count; ++s) shapes(raised[static_cast<std::size_t>(s)], s) = 1.0;
   const Eigen::MatrixXd mass = shapes.transpose() * (assembly.mass_all * shapes);
-  return Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd>(mass, Eigen::EigenvaluesOnly).eigenvalues().maxCoeff();
+  return Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd>(mass, Eigen::EigenvaluesOnly)
+      .eigenvalues()
+      .maxCoeff();
 }
 
 BaseStudy study_base(const Tower& tower, const Assembly& assembly, const Eigenproblem& problem) {
@@ -67,9 +69,9 @@ BaseStudy study_base(const Tower& tower, const Assembly& assembly, const Eigenpr
     const Assembly variant = assemble(on_leg_springs(tower, stiffness));
     const Eigenproblem soft(variant.stiffness, variant.mass);
     const double base = std::sqrt(stiffness / mass) / kTurn;
-    study.rows.push_back(
-        {stiffness, first_frequencies(soft, variant, fmt::format("springs of {:.4g} N/m", stiffness)),
-         1.0 / std::hypot(1.0 / rigid.front(), 1.0 / base)});
+    study.rows.push_back({stiffness,
+                          first_frequencies(soft, variant, fmt::format("springs of {:.4g} N/m", stiffness)),
+                          1.0 / std::hypot(1.0 / rigid.front(), 1.0 / base)});
   }
   study.rows.push_back({std::nullopt, rigid, std::nullopt});
   return study;

@@ -15,7 +15,7 @@ struct BaseStudy {
     std::vector<double> frequencies;  ///< [Hz], ascending
     std::optional<double> bound;      ///< below the first frequency [Hz]; empty where the supports are rigid
   };
-  Axis axis = Axis::z;  ///< the axis that gives way
+  Axis axis = Axis::z;       ///< the axis that gives way
   std::size_t supports = 0;  ///< how many do
   std::vector<Row> rows;     ///< from soft to rigid
 };

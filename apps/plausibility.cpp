@@ -117,8 +117,8 @@ void about_liquids(const Tower& tower, Notes& notes) {
     const double mass = split_liquid(liquid).mass;
     for (const NodeMass& other : tower.node_masses) {
       if (std::abs(other.total / mass - 1.0) > 0.01) continue;
-      notes.push_back(fmt::format("Plausible? {} weighs as much as {} of {:.4g} kg: is it counted twice?", name,
-                                  with_label("the mass", other.label), other.total));
+      notes.push_back(fmt::format("Plausible? {} weighs as much as {} of {:.4g} kg: is it counted twice?",
+                                  name, with_label("the mass", other.label), other.total));
     }
   }
 }
@@ -126,8 +126,9 @@ void about_liquids(const Tower& tower, Notes& notes) {
 void about_soil(const Tower& tower, Notes& notes) {
   for (const Support& support : tower.supports) {
     if (!support.pad || within(support.pad->shear_modulus, 1e6, 10e9)) continue;
-    notes.push_back(fmt::format("Plausible? The soil under node '{}' has G = {:.4g} Pa; a bare number is in Pa.",
-                                tower.nodes[support.node].name, support.pad->shear_modulus));
+    notes.push_back(
+        fmt::format("Plausible? The soil under node '{}' has G = {:.4g} Pa; a bare number is in Pa.",
+                    tower.nodes[support.node].name, support.pad->shear_modulus));
     return;
   }
 }

@@ -33,11 +33,11 @@ std::string base_study_section(const Analysis& a) {
   }
   std::string out = section_head("STIFFNESS OF THE BASE");
   out += table.text();
-  return out + wrapped(fmt::format("{} fixed along {} on a spring each, all else as stated. Bound: 1/f2 = "
-                                   "1/f2 rigid + 1/f2 of the springs under the rigid tower; no f1 lies below.",
-                                   counted(static_cast<Index>(study.supports), "support"),
-                                   name_of(study.axis)),
-                       "  ", kTextWidth);
+  return out +
+         wrapped(fmt::format("{} fixed along {} on a spring each, all else as stated. Bound: 1/f2 = "
+                             "1/f2 rigid + 1/f2 of the springs under the rigid tower; no f1 lies below.",
+                             counted(static_cast<Index>(study.supports), "support"), name_of(study.axis)),
+                 "  ", kTextWidth);
 }
 
 std::string pad_words(const Pad& pad) {
@@ -49,9 +49,9 @@ std::string liquids_text(const Tower& tower) {
   std::string out;
   for (const Liquid& liquid : tower.liquids) {
     const LiquidSplit split = split_liquid(liquid);
-    std::string words = fmt::format("Liquid{}{}, radius {:.4g} m, depth {:.4g} m: {} kg",
-                                    liquid.label.empty() ? "" : " ", liquid.label, liquid.radius, liquid.depth,
-                                    kilograms(split.mass, split.mass));
+    std::string words =
+        fmt::format("Liquid{}{}, radius {:.4g} m, depth {:.4g} m: {} kg", liquid.label.empty() ? "" : " ",
+                    liquid.label, liquid.radius, liquid.depth, kilograms(split.mass, split.mass));
     if (liquid.rigid) {
       words += ", all of it moving with the nodes";
     } else {

@@ -7,8 +7,8 @@
 namespace swaymark::wording {
 
 Message perimeter_too_short(double perimeter, double least) {
-  return {fmt::format("a perimeter of {:.4g} m cannot enclose the area: a circle of it has {:.4g} m", perimeter,
-                      least),
+  return {fmt::format("a perimeter of {:.4g} m cannot enclose the area: a circle of it has {:.4g} m",
+                      perimeter, least),
           "check both values and their units"};
 }
 Message perimeter_missing(const std::vector<std::string>& sections) {
@@ -41,8 +41,9 @@ Message liquid_needs_label() {
   return {"the mass that sloshes has no name in the results", "add for example 'label: water'"};
 }
 Message liquid_label_taken(std::string_view label) {
-  return {fmt::format("the mass that sloshes takes its name from the label, and '{}' names something else already",
-                      excerpt(label)),
+  return {fmt::format(
+              "the mass that sloshes takes its name from the label, and '{}' names something else already",
+              excerpt(label)),
           "choose another label"};
 }
 Message liquid_without_mass() {

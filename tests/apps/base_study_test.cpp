@@ -26,9 +26,9 @@ void check_bounds(const BaseStudy& study) {
 }  // namespace
 
 TEST_CASE("a tower of 18.8 m softens on leg springs as published") {
-  // published.md section 5: 200, 50, 20 kN/mm moved the tower from 3.27 to 3.04, 2.56, 2.03 Hz. The areas there were
-  // those of tables with rounded sizes; 0.4 % covers them and the rounding of the figures. Their ratios, in which the
-  // sizes cancel, are good to the rounding of the figures alone.
+  // published.md section 5: 200, 50, 20 kN/mm moved the tower from 3.27 to 3.04, 2.56, 2.03 Hz. The areas
+  // there were those of tables with rounded sizes; 0.4 % covers them and the rounding of the figures. Their
+  // ratios, in which the sizes cancel, are good to the rounding of the figures alone.
   constexpr double sizes = 4e-3;
   constexpr double digits = 0.005 / 2.03 + 0.005 / 3.27;
   const std::vector<std::pair<double, double>> published{{200e6, 3.04}, {50e6, 2.56}, {20e6, 2.03}};
@@ -86,7 +86,8 @@ TEST_CASE("the bound is the frequency itself where one mass hangs on springs in 
 }
 
 TEST_CASE("on three legs and in the sway of a symmetric tower the tower on springs rocks as a rigid body") {
-  // Rocking about a horizontal axis in the base: w^T M w over the sum of the squared lever arms of the legs. Derived.
+  // Rocking about a horizontal axis in the base: w^T M w over the sum of the squared lever arms of the legs.
+  // Derived.
   for (const int legs : {3, 4, 6}) {
     INFO(legs << " legs");
     Mast mast;
@@ -97,7 +98,8 @@ TEST_CASE("on three legs and in the sway of a symmetric tower the tower on sprin
     const Eigen::VectorXd w = rigid_tilt(tower, assembly.dofs, Axis::x, Eigen::Vector3d::Zero());
     double arms = 0.0;
     for (const Support& support : tower.supports) arms += std::pow(tower.nodes[support.node].position.x(), 2);
-    CHECK_THAT(mass_on_support(tower, assembly, factor), is_near(w.dot(assembly.mass_all * w) / arms, kSolved));
+    CHECK_THAT(mass_on_support(tower, assembly, factor),
+               is_near(w.dot(assembly.mass_all * w) / arms, kSolved));
   }
 }
 

@@ -93,8 +93,9 @@ TEST_CASE("a liquid that is no liquid and one that is carried twice are asked ab
 
 TEST_CASE("soil softer than any and harder than rock is asked about") {
   const auto pad = [&](const std::string& modulus) {
-    return checked(tower_with({"supports: [{nodes: [a, b], pad: {length: 2, width: 2, poisson: 0.3, shear_modulus: " +
-                               modulus + "}}]"}));
+    return checked(tower_with(
+        {"supports: [{nodes: [a, b], pad: {length: 2, width: 2, poisson: 0.3, shear_modulus: " + modulus +
+         "}}]"}));
   };
   CHECK(asks(pad("60"), "G = 60 Pa"));
   CHECK(asks(pad("60 GPa"), "under node 'a'"));
@@ -102,7 +103,8 @@ TEST_CASE("soil softer than any and harder than rock is asked about") {
 }
 
 TEST_CASE("sloshing below the range of towers is not asked about") {
-  const std::string tank = "masses: [{nodes: [c], liquid: {radius: 1 m, depth: 1 m, density: 1000}, label: water}]";
+  const std::string tank =
+      "masses: [{nodes: [c], liquid: {radius: 1 m, depth: 1 m, density: 1000}, label: water}]";
   const Analysis analysis = checked(tower_with({tank, "modes: {count: 3}"}));
   REQUIRE(analysis.frequency(0) < 1.0);  // a meter of height: common are 10 to 300 Hz
   REQUIRE(analysis.character.front() == "liquid");

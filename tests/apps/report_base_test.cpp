@@ -10,7 +10,8 @@ namespace swaymark::test {
 
 namespace {
 
-const std::string kTank = "masses: [{nodes: [c], liquid: {radius: 2 m, depth: 2 m, density: 1000}, label: water}]";
+const std::string kTank =
+    "masses: [{nodes: [c], liquid: {radius: 2 m, depth: 2 m, density: 1000}, label: water}]";
 
 }  // namespace
 
@@ -30,11 +31,12 @@ TEST_CASE("a report without a base study does not speak of one") {
 }
 
 TEST_CASE("the springs of a pad are reported with what they came from") {
-  const Analysis analysis = checked(
-      tower_with({"supports: [{nodes: [a, b], pad: {length: 3, width: 2, shear_modulus: 60 MPa, poisson: 0.3}}]"}));
+  const Analysis analysis = checked(tower_with(
+      {"supports: [{nodes: [a, b], pad: {length: 3, width: 2, shear_modulus: 60 MPa, poisson: 0.3}}]"}));
   const std::string text = on_one_line(text_report(analysis, {}));
   CHECK(text.find("from a pad of 3 x 2 m, G = 60 MPa, nu = 0.3") != std::string::npos);
-  CHECK(text.find(fmt::format("z {:.4g} MN/m", 1e-6 * analysis.tower.supports[0].spring[2])) != std::string::npos);
+  CHECK(text.find(fmt::format("z {:.4g} MN/m", 1e-6 * analysis.tower.supports[0].spring[2])) !=
+        std::string::npos);
 }
 
 TEST_CASE("a liquid is reported with its two masses and its own frequency") {

@@ -173,4 +173,18 @@ TEST_CASE("modes without damping have an empty cell for it") {
   CHECK(rows[1][3].empty());
 }
 
+TEST_CASE("the base study is a sheet whose last row is the rigid base") {
+  const Analysis analysis = checked(lone_mass({"base_study: [20 kN/mm, 1000 kN/mm]"}));
+  const auto rows = sheet_of(analysis, "base_study.csv");
+  REQUIRE(rows.size() == 9);
+  CHECK(rows[0].front() == "stiffness [N/m]");
+  CHECK(rows[0][1] == "frequency 1 [Hz]");
+  CHECK(rows[0].back() == "bound [Hz]");
+  CHECK_THAT(std::stod(rows[1].front()), is_near(20e6, kRoundoff));
+  CHECK_THAT(std::stod(rows[1].back()), is_near(*analysis.base_study->rows[0].bound, kRoundoff));
+  CHECK(rows[8].front().empty());
+  CHECK(rows[8].back().empty());
+  CHECK_THAT(std::stod(rows[8][1]), is_near(lone_frequency(), kSolved));
+}
+
 }  // namespace swaymark::test

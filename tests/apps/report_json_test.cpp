@@ -298,4 +298,42 @@ TEST_CASE("words with quotes and many alphabets come back whole and a file name 
   CHECK(json["input"]["file"] == "mast-\ufffd.yaml");
 }
 
+TEST_CASE("the base study is a list from soft to rigid") {
+  const Json json = json_of(checked(lone_mass({"base_study: [20 kN/mm, 1000 kN/mm]"})));
+  const Json& rows = json["base_study"];
+  REQUIRE(rows.size() == 8);
+  CHECK(keys_of(rows[0]) == Keys{"stiffness", "frequencies", "bound"});
+  CHECK(rows[0]["stiffness"] == 20e6);
+  // One mass on springs in series, all of them weightless: the bound is the frequency.
+  CHECK_THAT(rows[0]["bound"].get<double>(), is_near(rows[0]["frequencies"][0].get<double>(), kSolved));
+  CHECK(keys_of(rows[7]) == Keys{"frequencies"});
+  CHECK_THAT(rows[7]["frequencies"][0].get<double>(), is_near(lone_frequency(), kSolved));
+}
+
+TEST_CASE("ice and liquid stand in the ledger and the parts of the liquid beside it") {
+  const Analysis analysis =
+      checked(tower_with({"sections: {bar: {area: 10 cm2, perimeter: 0.4 m}}",
+                          "masses: [{group: all, ice: 20 mm, density: 900, label: glaze}, "
+                          "{nodes: [c], liquid: {radius: 1 m, depth: 1 m, density: 1000}, label: water}]",
+                          "modes: {count: 2}"}));
+  const Json json = json_of(analysis, true);
+  const Json& ledger = json["mass"]["ledger"];
+  REQUIRE(ledger.size() == 3);
+  CHECK(ledger[1]["origin"] == "ice");
+  CHECK(ledger[1]["group"] == "all");
+  CHECK(ledger[1]["label"] == "glaze");
+  CHECK(ledger[2]["origin"] == "liquid");
+  CHECK(ledger[2]["label"] == "water");
+  double sum = 0.0;
+  for (const Json& entry : ledger) sum += entry["mass"].get<double>();
+  CHECK_THAT(sum, is_near(json["mass"]["total"].get<double>(), kRoundoff));
+  const Json& liquid = json["mass"]["liquids"][0];
+  CHECK(keys_of(liquid) == Keys{"label", "mass", "impulsive", "convective", "spring", "frequency"});
+  CHECK_THAT(liquid["impulsive"].get<double>() + liquid["convective"].get<double>(),
+             is_near(ledger[2]["mass"].get<double>(), kRoundoff));
+  CHECK(json["model"]["nodes"] == 3);
+  CHECK(json["modes"][0]["character"] == "liquid");
+  CHECK(keys_of(json["modes"][0]["shape"]) == Keys{"a", "b", "c", "water"});
+}
+
 }  // namespace swaymark::test

@@ -35,10 +35,12 @@ TEST_CASE("a tank as deep as wide has the masses of Housner's formulas") {
 
 TEST_CASE("the convective share agrees with the table of EN 1998-4") {
   // EN 1998-4:2006, Table A.2, m_c/m by H/R (from memory), three digits.
-  const std::vector<std::pair<double, double>> published{{0.3, 0.824}, {0.5, 0.700}, {0.7, 0.586}, {1.0, 0.452},
-                                                         {1.5, 0.314}, {2.0, 0.237}, {2.5, 0.190}, {3.0, 0.158}};
-  // The table holds all that is not impulsive, the higher sloshing modes among it; the first alone is some percent
-  // less: the sum over all roots x of J1' of 2 tanh(x H/R) / (x H/R (x^2 - 1)) tells 8 % at H/R = 0.3. Derived.
+  const std::vector<std::pair<double, double>> published{{0.3, 0.824}, {0.5, 0.700}, {0.7, 0.586},
+                                                         {1.0, 0.452}, {1.5, 0.314}, {2.0, 0.237},
+                                                         {2.5, 0.190}, {3.0, 0.158}};
+  // The table holds all that is not impulsive, the higher sloshing modes among it; the first alone is some
+  // percent less: the sum over all roots x of J1' of 2 tanh(x H/R) / (x H/R (x^2 - 1)) tells 8 % at H/R =
+  // 0.3. Derived.
   for (const auto& [ratio, share] : published) {
     INFO(ratio);
     const LiquidSplit split = split_liquid(water(1.0, ratio));
@@ -48,8 +50,8 @@ TEST_CASE("the convective share agrees with the table of EN 1998-4") {
 }
 
 TEST_CASE("a shallow liquid sloshes nearly whole and a deep one mostly stays") {
-  // The limits of the formula: 2 / (1.841^2 - 1) = 0.8371 for H/R to 0; m_c of a depth of about R / 1.841 x 0.837 for
-  // H/R without end. Derived.
+  // The limits of the formula: 2 / (1.841^2 - 1) = 0.8371 for H/R to 0; m_c of a depth of about R / 1.841 x
+  // 0.837 for H/R without end. Derived.
   const double limit = 2.0 / (1.841 * 1.841 - 1.0);
   const LiquidSplit shallow = split_liquid(water(10.0, 1e-6));
   CHECK_THAT(shallow.convective / shallow.mass, is_near(limit, 1e-9));

@@ -8,8 +8,8 @@
 namespace swaymark::test {
 
 TEST_CASE("a square pad is nearly a disc of the same area") {
-  // Rigid disc on a half-space, exact upright: K_z = 4 G R / (1 - nu), K_x = 8 G R / (2 - nu) (from memory). A
-  // square stirs a little more ground than the disc of its area: up to 5 % more stiffness, common practice.
+  // Rigid disc on a half-space, exact upright: K_z = 4 G R / (1 - nu), K_x = 8 G R / (2 - nu) (from memory).
+  // A square stirs a little more ground than the disc of its area: up to 5 % more stiffness, common practice.
   constexpr double modulus = 60e6;
   for (const double nu : {0.0, 0.2, 0.3, 0.49}) {
     for (const double side : {0.5, 2.0, 6.0}) {

@@ -74,8 +74,9 @@ const std::string kWater = "liquid: {radius: 1.9 m, depth: 3.5 m, density: 1000 
 }  // namespace
 
 TEST_CASE("ice lies on the bars of a group over a range of heights") {
-  const Tower tower = tower_of(tower_with(
-      {kOutlined, "masses: [{group: g, ice: 20 mm, density: 900 kg/m3, from: 0.2 m, to: 3 m, label: glaze}, "
+  const Tower tower = tower_of(
+      tower_with({kOutlined,
+                  "masses: [{group: g, ice: 20 mm, density: 900 kg/m3, from: 0.2 m, to: 3 m, label: glaze}, "
                   "{group: all, ice: 0.01, density: 500}]"}));
   REQUIRE(tower.ice.size() == 2);
   CHECK(tower.ice[0].group == std::size_t{0});
@@ -92,8 +93,8 @@ TEST_CASE("ice names every section whose outline is not known") {
   CHECK(refusals_with("masses: [{group: all, ice: 20 mm, density: 900 kg/m3}]") ==
         Refusals{"8:10 ice needs the outline of its bars, and no perimeter is known of section 'bar'"});
   // A section with a fault of its own is not blamed again.
-  CHECK(refusals_of(tower_with({"sections: {bar: {area: 0}}",
-                                "masses: [{group: all, ice: 20 mm, density: 900 kg/m3}]"})) ==
+  CHECK(refusals_of(tower_with(
+            {"sections: {bar: {area: 0}}", "masses: [{group: all, ice: 20 mm, density: 900 kg/m3}]"})) ==
         Refusals{"4:24 'area' must be above zero, got '0'"});
 }
 
@@ -121,8 +122,8 @@ TEST_CASE("a liquid adds a node for what sloshes in the middle of its own") {
 
 TEST_CASE("what sloshes may stand where a node stands and a rigid liquid adds none") {
   CHECK(tower_of(tower_with({"masses: [{nodes: [c], " + kWater + ", label: water}]"})).nodes.size() == 4);
-  const Tower rigid = tower_of(tower_with(
-      {"masses: [{nodes: [c], liquid: {radius: 1.9, depth: 3.5, density: 1000, rigid: true}}]"}));
+  const Tower rigid = tower_of(
+      tower_with({"masses: [{nodes: [c], liquid: {radius: 1.9, depth: 3.5, density: 1000, rigid: true}}]"}));
   CHECK(rigid.nodes.size() == 3);
   CHECK(rigid.liquids.at(0).rigid);
 }

@@ -1,7 +1,6 @@
 #include "core/tower_file_supports.hpp"
 
 #include "core/pad.hpp"
-
 #include "tests/core/tower_text.hpp"
 #include "tests/support/matchers.hpp"
 

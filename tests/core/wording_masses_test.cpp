@@ -17,8 +17,9 @@ std::vector<Message> messages_about(const std::string& text) {
 TEST_CASE("every message on ice and liquids says what is wrong and what would cure it") {
   using namespace wording;
   std::vector<Message> messages = messages_about("leg");
-  const std::vector<Message> plain{perimeter_too_short(0.1, 0.2), ice_on_nothing("all"),     heights_reversed(2.0, 1.0),
-                                   heights_in_one_dimension(),    liquid_in_one_dimension(), liquid_needs_label(),
+  const std::vector<Message> plain{perimeter_too_short(0.1, 0.2), ice_on_nothing("all"),
+                                   heights_reversed(2.0, 1.0),    heights_in_one_dimension(),
+                                   liquid_in_one_dimension(),     liquid_needs_label(),
                                    liquid_without_mass()};
   messages.insert(messages.end(), plain.begin(), plain.end());
   for (const Message& message : messages) {

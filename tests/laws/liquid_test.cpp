@@ -111,7 +111,8 @@ TEST_CASE("two lowest modes of a mast with a tank are those of its liquid") {
   CHECK(analysis.character[0] == "liquid");
   CHECK(analysis.character[1] == "liquid");
   CHECK(analysis.character[2] != "liquid");
-  // The mast gives way a little, and no more: Rayleigh's quotient of the sloshing mass alone is an upper bound.
+  // The mast gives way a little, and no more: Rayleigh's quotient of the sloshing mass alone is an upper
+  // bound.
   const double own = split_liquid(analysis.tower.liquids.front()).omega / kTurn;
   CHECK(analysis.frequency(1) < own);
   CHECK(analysis.frequency(0) > 0.9 * own);
@@ -139,7 +140,8 @@ TEST_CASE("ice on every bar is a mass per length on every bar") {
   LineMass line;
   line.per_length = 900.0 * (0.25 * 0.02 + std::numbers::pi * 0.02 * 0.02);
   lined.line_masses.push_back(line);
-  CHECK_THAT(Eigen::MatrixXd(assemble(iced).mass_all), matrix_near(Eigen::MatrixXd(assemble(lined).mass_all), kRoundoff));
+  CHECK_THAT(Eigen::MatrixXd(assemble(iced).mass_all),
+             matrix_near(Eigen::MatrixXd(assemble(lined).mass_all), kRoundoff));
 }
 
 }  // namespace swaymark::test
