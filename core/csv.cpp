@@ -5,12 +5,14 @@
 #include <fmt/format.h>
 
 #include "core/text.hpp"
+#include "core/wording_tables.hpp"
 
 namespace swaymark {
 
 namespace {
 
 constexpr std::size_t kMostBytes = std::size_t{64} << 20U;
+constexpr std::size_t kMostCells = 6'000'000;                // a table of them takes some 300 MB of memory
 constexpr std::string_view kByteOrderMark = "\xEF\xBB\xBF";  // spreadsheets write it before UTF-8
 constexpr std::string_view kBlanks = " \t\r";                // the last, of a line end with two characters
 
@@ -140,6 +142,9 @@ CsvTable parse_csv(std::string_view text, FaultList& faults) {
       if (table.columns.empty()) return table;
     } else if (cells->size() != table.columns.size()) {
       faults.add({number, 1}, wording::csv_cells(cells->size(), table.columns.size()));
+    } else if ((table.rows.size() + 1) * table.columns.size() > kMostCells) {
+      faults.add({number, 1}, wording::csv_too_many_cells(kMostCells));
+      return table;
     } else {
       table.rows.push_back(std::move(*cells));
     }

@@ -30,6 +30,11 @@ InputError::InputError(std::vector<Fault> faults) : faults_(std::move(faults)) {
 
 ComputationError::ComputationError(Message message) : message_(std::move(message)), text_(joined(message_)) {}
 
+std::uint32_t FaultList::add_file(std::string file) {
+  files_.push_back(std::move(file));
+  return static_cast<std::uint32_t>(files_.size() - 1);
+}
+
 void FaultList::take(FaultList other) {
   std::move(other.faults_.begin(), other.faults_.end(), std::back_inserter(faults_));
 }
@@ -37,8 +42,8 @@ void FaultList::take(FaultList other) {
 void FaultList::throw_if_any() {
   if (faults_.empty()) return;
   std::stable_sort(faults_.begin(), faults_.end(), [this](const Fault& a, const Fault& b) {
-    const bool a_elsewhere = a.file != file_;
-    const bool b_elsewhere = b.file != file_;
+    const bool a_elsewhere = a.file != files_.front();
+    const bool b_elsewhere = b.file != files_.front();
     return std::tie(a_elsewhere, a.file, a.place.line, a.place.column) <
            std::tie(b_elsewhere, b.file, b.place.line, b.place.column);
   });

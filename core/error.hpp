@@ -11,6 +11,7 @@ namespace swaymark {
 struct Place {
   std::uint32_t line = 0;
   std::uint32_t column = 0;
+  std::uint32_t file = 0;  ///< 0: the file that is read; else one it names, as FaultList::add_file counts
 
   [[nodiscard]] bool known() const { return line > 0; }
 };
@@ -58,8 +59,15 @@ class ComputationError : public std::exception {
 /// Collects faults so that one run reports all of them.
 class FaultList {
  public:
-  explicit FaultList(std::string file) : file_(std::move(file)) {}
-  void add(Place place, Message message) { faults_.push_back({file_, place, std::move(message)}); }
+  explicit FaultList(std::string file) : files_{std::move(file)} {}
+  /// A place in a file that is not known by its number is shown in the first.
+  void add(Place place, Message message) {
+    faults_.push_back({files_[place.file < files_.size() ? place.file : 0], place, std::move(message)});
+  }
+  /// Makes another file known. \return what Place::file is in it.
+  std::uint32_t add_file(std::string file);
+  /// By Place::file.
+  [[nodiscard]] const std::vector<std::string>& files() const { return files_; }
   /// Those of another file that the file names.
   void take(FaultList other);
   [[nodiscard]] bool empty() const { return faults_.empty(); }
@@ -68,7 +76,7 @@ class FaultList {
   void throw_if_any();
 
  private:
-  std::string file_;
+  std::vector<std::string> files_;
   std::vector<Fault> faults_;
 };
 

@@ -7,6 +7,7 @@
 namespace swaymark {
 
 std::string Tower::bar_name(std::size_t bar) const {
+  if (!bars[bar].name.empty()) return bars[bar].name;
   return fmt::format("{}-{}", groups[bars[bar].group].name, bars[bar].number);
 }
 

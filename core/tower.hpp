@@ -58,6 +58,7 @@ struct Bar {
   Place place;
   std::optional<std::size_t> section = {};   ///< its own, where it differs from the group's
   std::optional<std::size_t> material = {};  ///< likewise
+  std::string name = {};                     ///< its own, where it is not named by group and number
 };
 
 /// A rigid rectangular footing on the ground's surface.
@@ -134,10 +135,35 @@ struct LooseNodes {
   std::vector<std::string> cures;
 };
 
+/// Where two segments meet away from a common node, or a node stands on a segment that does not end there.
+struct SegmentCrossing {
+  std::string first;   ///< a bar; the one that ends there, if one does
+  std::string second;  ///< empty where a node of no segment stands on the first
+  Eigen::Vector3d position = Eigen::Vector3d::Zero();  ///< [m]
+  std::optional<std::size_t> node = {};                ///< that stands there
+  bool at_end = false;                                 ///< the first ends on the second
+};
+
+/// What was made of a drawing by line segments, so that a report can state it.
+struct SegmentReading {
+  std::string file;
+  std::size_t segments = 0;
+  std::size_t nodes = 0;      ///< their end points are
+  std::size_t named = 0;      ///< of these, stated by hand or by the lattice too
+  std::size_t moved = 0;      ///< end points that stand elsewhere than drawn
+  double largest_move = 0.0;  ///< [m]
+  std::size_t largest_move_node = 0;
+  double merge_within = 0.0;  ///< [m]
+  bool merge_within_stated = false;
+  bool split = false;  ///< the bars end at the crossings
+  std::vector<SegmentCrossing> crossings;
+};
+
 enum class MassScheme { consistent, lumped, averaged };
 
 struct Tower {
-  std::string file;  ///< the name it was read from, for messages and reports
+  std::string file;                ///< the name it was read from, for messages and reports
+  std::vector<std::string> files;  ///< by Place::file: that one, then those it names; empty if made in memory
   std::string title;
   int dimensions = 3;
 
@@ -153,6 +179,7 @@ struct Tower {
   std::vector<IceMass> ice;
   std::vector<Liquid> liquids;
   std::vector<LooseNodes> lattice_leaves_loose;  ///< of a tower written by panels
+  std::optional<SegmentReading> segments;        ///< of a tower drawn by line segments
 
   MassScheme mass_scheme = MassScheme::consistent;
   std::vector<double>
@@ -165,7 +192,7 @@ struct Tower {
   std::optional<BaseStudyStatement> base_study;
 
   [[nodiscard]] std::vector<Axis> axes() const { return axes_of(dimensions); }
-  /// `legs-3`
+  /// Its own name, or `legs-3` after its group and number.
   [[nodiscard]] std::string bar_name(std::size_t bar) const;
   [[nodiscard]] const Section& section_of(const Bar& bar) const;
   [[nodiscard]] const Material& material_of(const Bar& bar) const;

@@ -5,7 +5,9 @@
 #include "core/tower_file_members.hpp"
 #include "core/tower_file_parts.hpp"
 #include "core/tower_file_requests.hpp"
+#include "core/tower_file_segments.hpp"
 #include "core/tower_file_supports.hpp"
+#include "core/tower_file_tables.hpp"
 #include "core/tower_file_values.hpp"
 #include "core/validate.hpp"
 
@@ -63,14 +65,20 @@ void read_stiffening(MapView& file) {
 }
 
 void refuse_later_keys(MapView& file) {
-  file.refuse_later("nodes_from", "nodes from a CSV file are");
-  file.refuse_later("bars_from", "bars from a CSV file are");
-  file.refuse_later("segments_from", "bars from line segments are");
-  file.refuse_later("split_crossings", "bars from line segments are");
   file.refuse_later("scenarios", "scenarios are");
   file.refuse_later("stabilise", "springs at loose nodes are");
   file.refuse_later("member_bending", "bending of members is");
   file.refuse_later("uncertainty", "intervals of frequency are");
+}
+
+// Tables of bars, and what can be said of groups and names once all bars are known.
+void read_bars_elsewhere(MapView& file, const FileSource& source, PartNames& parts, const NameTable& groups,
+                         Tower& tower) {
+  read_bars_from(file, source, parts.nodes, groups, tower);
+  read_segments(file, source, parts, groups, tower);
+  if (!file.has("bars_from") && !file.has("segments_from")) return;
+  check_bar_names(tower, file.faults());
+  if (file.faults().empty()) check_groups_have_bars(tower, file.faults());
 }
 
 }  // namespace
@@ -88,9 +96,11 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   const bool nodes_elsewhere = file.has("lattice") || file.has("nodes_from") || file.has("segments_from");
   if (!nodes_elsewhere) static_cast<void>(file.require("nodes", "nodes: {1: [0, 0, 0], 2: [0, 0, 3 m]}"));
   PartNames parts = read_parts(file, tower, source);
+  read_nodes_from(file, source, parts.nodes, tower);
   NameTable groups("group");
   read_lattice(file, parts, groups, tower);
   read_members(file, parts, groups, tower);
+  read_bars_elsewhere(file, source, parts, groups, tower);
   read_supports(file, parts.nodes, tower);
   read_base_study(file, tower);
   read_masses(file, parts.nodes, groups, tower);
@@ -100,10 +110,11 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   read_modes(file, tower);
   read_bands(file, tower);
   NameTable spectra("spectrum");
-  read_spectra(file, tower, spectra);
+  read_spectra(file, source, tower, spectra);
   read_seismic(file, tower, spectra);
   file.refuse_unknown();
   validate(tower, faults);
+  tower.files = faults.files();
   faults.throw_if_any();
   return tower;
 }

@@ -39,8 +39,9 @@ void read_group_name(const YamlNode& node, Group& group, std::size_t generated, 
   groups.add(group.name, tower.groups.size(), node.place);
 }
 
-void read_group(const YamlNode& item, const PartNames& parts, std::size_t generated, Tower& tower,
-                NameTable& groups, FaultList& faults) {
+// \param bars_elsewhere  tables may give the bars.
+void read_group(const YamlNode& item, const PartNames& parts, std::size_t generated, bool bars_elsewhere,
+                Tower& tower, NameTable& groups, FaultList& faults) {
   MapView view(item, "a group of members", faults);
   if (!view.is_map()) return;
   Group group;
@@ -55,9 +56,8 @@ void read_group(const YamlNode& item, const PartNames& parts, std::size_t genera
     group.material = parts.materials.find(*material, faults).value_or(0);
   }
   tower.groups.push_back(group);
-  if (const YamlNode* bars = view.require("bars", "bars: [[1, 5], [2, 6]]")) {
-    read_bars(*bars, parts.nodes, tower, faults);
-  }
+  const YamlNode* bars = bars_elsewhere ? view.find("bars") : view.require("bars", "bars: [[1, 5], [2, 6]]");
+  if (bars != nullptr) read_bars(*bars, parts.nodes, tower, faults);
   view.refuse_unknown();
 }
 
@@ -70,7 +70,9 @@ void read_members(MapView& file, const PartNames& parts, NameTable& groups, Towe
   const auto* items = read_list(*members, "members", "groups of bars", file.faults());
   if (items == nullptr) return;
   const std::size_t generated = tower.groups.size();
-  for (const YamlNode& item : *items) read_group(item, parts, generated, tower, groups, file.faults());
+  const bool bars_elsewhere = file.has("bars_from") || file.has("segments_from");
+  for (const YamlNode& item : *items)
+    read_group(item, parts, generated, bars_elsewhere, tower, groups, file.faults());
 }
 
 }  // namespace swaymark

@@ -11,8 +11,6 @@ namespace swaymark {
 
 namespace {
 
-constexpr double kFarthest = 1e6;  // [m]
-
 // Names that are written twice were reported with the keys: the first one stands.
 template <typename Visit>
 void read_named(MapView& file, std::string_view key, NameTable& names, Visit visit) {
@@ -68,12 +66,11 @@ std::optional<Eigen::Vector3d> read_position(const std::string& name, const Yaml
   return position;
 }
 
-// Where the node of that index waits while its place is unknown: alone, so that it coincides with no other.
+}  // namespace
+
 Eigen::Vector3d out_of_the_way(std::size_t index) {
   return {2.0 * kFarthest + static_cast<double>(index), 0.0, 0.0};
 }
-
-}  // namespace
 
 PartNames read_parts(MapView& file, Tower& tower, const FileSource& source) {
   PartNames names;

@@ -4,6 +4,7 @@
 
 #include <fmt/format.h>
 
+#include "core/spectrum_csv.hpp"
 #include "core/text.hpp"
 
 namespace swaymark {
@@ -129,8 +130,8 @@ void read_points(const YamlNode& node, SpectrumStatement& spectrum, FaultList& f
   }
 }
 
-void read_spectrum(const std::string& name, const YamlNode& key, const YamlNode& node, Tower& tower,
-                   NameTable& names, FaultList& faults) {
+void read_spectrum(const std::string& name, const YamlNode& key, const YamlNode& node,
+                   const FileSource& source, Tower& tower, NameTable& names, FaultList& faults) {
   names.add(name, tower.spectra.size(), key.place);
   SpectrumStatement spectrum;
   spectrum.name = name;
@@ -151,9 +152,10 @@ void read_spectrum(const std::string& name, const YamlNode& key, const YamlNode&
   for (const char* later : {"rule", "type", "ground", "ag", "q"}) {
     view.refuse_later(later, "spectra by the formulas of a code are");
   }
-  view.refuse_later("points_from", "points from a CSV file are");
-  const bool elsewhere = view.has("rule") || view.has("points_from");
-  if (elsewhere) {
+  if (view.has("points") && view.has("points_from"))
+    faults.add(key.place, wording::keys_exclude("points", "points_from", view.owner()));
+  read_points_from(view, tower.file, source, spectrum);
+  if (view.has("rule") || view.has("points_from")) {
     static_cast<void>(view.find("points"));
   } else if (const YamlNode* points = view.require("points", "points: [[0.0 s, 0.10 g], [0.2 s, 0.25 g]]")) {
     read_points(*points, spectrum, faults);
@@ -220,13 +222,13 @@ void read_bands(MapView& file, Tower& tower) {
   for (const YamlNode& item : *items) read_band(item, tower, labels, file.faults());
 }
 
-void read_spectra(MapView& file, Tower& tower, NameTable& names) {
+void read_spectra(MapView& file, const FileSource& source, Tower& tower, NameTable& names) {
   const YamlNode* node = file.find("spectra");
   if (node == nullptr) return;
   for_each_named(*node, "spectra", file.faults(),
                  [&](const std::string& name, const YamlNode& key, const YamlNode& value) {
                    if (names.place_of(name)) return;  // written twice: reported with the keys
-                   read_spectrum(name, key, value, tower, names, file.faults());
+                   read_spectrum(name, key, value, source, tower, names, file.faults());
                  });
 }
 

@@ -1,5 +1,6 @@
 #pragma once
 
+#include "core/file_source.hpp"
 #include "core/tower.hpp"
 #include "core/tower_file_values.hpp"
 
@@ -8,7 +9,7 @@ namespace swaymark {
 
 void read_modes(MapView& file, Tower& tower);
 void read_bands(MapView& file, Tower& tower);
-void read_spectra(MapView& file, Tower& tower, NameTable& names);
+void read_spectra(MapView& file, const FileSource& source, Tower& tower, NameTable& names);
 void read_seismic(MapView& file, Tower& tower, const NameTable& spectra);
 
 }  // namespace swaymark

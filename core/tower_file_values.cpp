@@ -129,12 +129,15 @@ std::optional<Place> NameTable::place_of(const std::string& name) const {
 
 std::optional<std::size_t> NameTable::find(const YamlNode& node, FaultList& faults) const {
   const std::string* name = scalar(node, kind_, "a name", faults);
-  if (name == nullptr) return std::nullopt;
-  const auto found = entries_.find(*name);
+  return name == nullptr ? std::nullopt : find(*name, node.place, faults);
+}
+
+std::optional<std::size_t> NameTable::find(const std::string& name, Place at, FaultList& faults) const {
+  const auto found = entries_.find(name);
   if (found != entries_.end()) return found->second.index;
-  const auto several = several_.find(*name);
+  const auto several = several_.find(name);
   if (several != several_.end()) {
-    faults.add(node.place, wording::name_means_several(kind_, *name, several->second.size()));
+    faults.add(at, wording::name_means_several(kind_, name, several->second.size()));
     return std::nullopt;
   }
   if (open_) return std::nullopt;
@@ -144,9 +147,9 @@ std::optional<std::size_t> NameTable::find(const YamlNode& node, FaultList& faul
     std::vector<std::string> names;
     for (const auto& [known, entry] : entries_) names.push_back(known);
     std::sort(names.begin(), names.end());
-    close = nearest(*name, names);
+    close = nearest(name, names);
   }
-  faults.add(node.place, wording::name_unknown(kind_, *name, close));
+  faults.add(at, wording::name_unknown(kind_, name, close));
   return std::nullopt;
 }
 

@@ -48,6 +48,7 @@ class NameTable {
   [[nodiscard]] std::optional<Place> place_of(const std::string& name) const;
   /// The index of the name that stands at `node`, or a fault that names the nearest one known.
   [[nodiscard]] std::optional<std::size_t> find(const YamlNode& node, FaultList& faults) const;
+  [[nodiscard]] std::optional<std::size_t> find(const std::string& name, Place at, FaultList& faults) const;
   /// As find, for names that may stand for several.
   [[nodiscard]] std::vector<std::size_t> find_all(const YamlNode& node, FaultList& faults) const;
 
