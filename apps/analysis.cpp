@@ -7,6 +7,7 @@
 #include <fmt/format.h>
 
 #include "apps/notes.hpp"
+#include "apps/segment_notes.hpp"
 #include "modal/damping.hpp"
 #include "modal/mode_character.hpp"
 #include "modal/participation.hpp"
@@ -169,7 +170,10 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
                     {},
                     {},
                     {}};
-  if (analysis.mechanisms.any()) return analysis;
+  if (analysis.mechanisms.any()) {
+    analysis.notes = segment_notes(analysis.tower);
+    return analysis;
+  }
   const SparseMatrix& stiffness = analysis.assembly.stiffness;
   const SparseMatrix& mass = analysis.assembly.mass;
   if (mass.rows() == 0)

@@ -7,6 +7,7 @@
 
 #include "apps/plausibility.hpp"
 #include "apps/report_parts.hpp"
+#include "apps/segment_notes.hpp"
 
 namespace swaymark {
 
@@ -169,7 +170,7 @@ void about_combination(const Analysis& analysis, Notes& notes) {
 }  // namespace
 
 std::vector<std::string> notes_of(const Analysis& analysis) {
-  Notes notes;
+  Notes notes = segment_notes(analysis.tower);
   about_modes(analysis, notes);
   about_shapes(analysis, notes);
   about_bands(analysis, notes);

@@ -6,6 +6,7 @@
 #include <fmt/format.h>
 
 #include "apps/figure.hpp"
+#include "apps/segment_notes.hpp"
 #include "apps/table.hpp"
 
 namespace swaymark {
@@ -77,6 +78,9 @@ std::string mechanism_text(const Analysis& analysis) {
     out += wrapped(loose.what, "  the pattern: ", kColumns);
     for (const std::string& cure : loose.cures) out += wrapped(cure, "     cure: ", kColumns);
   }
+  // A joint that was not drawn is a likely cause.
+  for (const std::string& note : segment_notes(analysis.tower))
+    out += wrapped(note, "  the drawing: ", kColumns);
   return out;
 }
 

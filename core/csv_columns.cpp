@@ -95,7 +95,7 @@ std::optional<TableFile> read_table(MapView& view, std::string_view key, const s
   const bool complete = result.faults.empty();
   result.usable = check_columns(result.table, form, result.faults);
   if (complete && result.usable && result.table.rows.empty())
-    result.faults.add({}, wording::table_without_rows(form.owner));
+    result.faults.add({result.table.columns.front().place.line, 1}, wording::table_without_rows(form.owner));
   return result;
 }
 

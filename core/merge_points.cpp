@@ -67,7 +67,7 @@ MergedPoints merge_points(const std::vector<Eigen::Vector3d>& points, double wit
   std::unordered_map<Bits, std::size_t, BitsHash> same;  // most ends are drawn at the very same point
   same.reserve(points.size());
   PointGrid grid(within);
-  for (std::size_t i = 0; i < points.size() && merged.complete; ++i) {
+  for (std::size_t i = 0; i < points.size() && !merged.crowded; ++i) {
     const auto [twin, fresh] = same.emplace(bits_of(points[i]), i);
     if (!fresh) {
       clusters.join(i, twin->second);
@@ -78,7 +78,7 @@ MergedPoints merge_points(const std::vector<Eigen::Vector3d>& points, double wit
       ++around;
       if ((position - points[i]).norm() <= within) clusters.join(i, other);
     });
-    merged.complete = around <= kMostAround;
+    if (around > kMostAround) merged.crowded = i;
     grid.add(i, points[i]);
   }
   merged.first.resize(points.size());

@@ -1,6 +1,7 @@
 #pragma once
 
 #include <cstddef>
+#include <optional>
 #include <vector>
 
 #include <Eigen/Core>
@@ -12,8 +13,9 @@ namespace swaymark {
 struct MergedPoints {
   std::vector<std::size_t> first;  ///< by point: the earliest one of its cluster, which stands for it
   std::vector<double>
-      extent;            ///< by point, where it is the first: diagonal of the box around the cluster [m]
-  bool complete = true;  ///< false: so many points lie close together that the search was given up
+      extent;  ///< by point, where it is the first: diagonal of the box around the cluster [m]
+  /// A point with so many others around it that the search was given up.
+  std::optional<std::size_t> crowded = {};
 };
 
 /// Joins points whose distance is at most `within` [m] > 0, and what is joined with one of them in turn. The

@@ -80,7 +80,8 @@ void read_points_from(MapView& view, const std::string& tower_file, const FileSo
     const auto points = read_rows(*table, spectrum.interpolation == Interpolation::log_log);
     check_order(points, table->table.column("frequency").has_value(), table->faults);
     for (const Point& point : points) spectrum.points.emplace_back(point.period, point.acceleration);
-    if (points.size() < 2 && table->faults.empty()) table->faults.add({}, wording::points_need_two());
+    if (points.size() < 2 && table->faults.empty())
+      table->faults.add({table->table.columns.front().place.line, 1}, wording::points_need_two());
   }
   view.faults().take(std::move(table->faults));
 }

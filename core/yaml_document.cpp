@@ -219,7 +219,7 @@ std::string YamlNode::description() const {
     case Kind::null:
       return "nothing";
     case Kind::scalar:
-      return "'" + excerpt(text) + "'";
+      return fmt::format("'{}'", excerpt(text));
     case Kind::sequence:
       return "a list";
     case Kind::map:

@@ -1,5 +1,7 @@
 #include "core/csv.hpp"
 
+#include <algorithm>
+
 #include <catch2/catch.hpp>
 #include <fmt/format.h>
 
@@ -119,6 +121,16 @@ TEST_CASE("a table longer than any tower needs is refused by its length") {
   const Lines refusals = refusals_of_csv(std::string(limit + 1, '\n'));
   REQUIRE(refusals.size() == 1);
   CHECK_THAT(refusals[0], Catch::Contains("bytes"));
+}
+
+TEST_CASE("a table of more cells than fit in memory is refused where they end") {
+  std::string text = std::string(99, ',') + "\n";  // a hundred columns without a name
+  for (int row = 0; row < 60'001; ++row) text += std::string(99, ',') + "\n";
+  FaultList faults("table.csv");
+  static_cast<void>(parse_csv(text, faults));
+  const Lines refusals = words_of(faults);
+  CHECK(std::find(refusals.begin(), refusals.end(),
+                  "60002:1 the table has more than the 6000000 cells that it may have") != refusals.end());
 }
 
 TEST_CASE("a column named twice is refused") {

@@ -73,4 +73,23 @@ TEST_CASE("no faults let the reading go on") {
   CHECK_NOTHROW(faults.throw_if_any());
 }
 
+TEST_CASE("a fault is shown in the file that its place counts") {
+  FaultList faults("tower.yaml");
+  const std::uint32_t nodes = faults.add_file("nodes.csv");
+  const std::uint32_t bars = faults.add_file("bars.csv");
+  faults.add({7, 1, bars}, {"odd", "cure"});
+  faults.add({9, 2, nodes}, {"odd", "cure"});
+  faults.add({3, 4}, {"odd", "cure"});
+  faults.add({5, 6, 99}, {"odd", "cure"});  // of no file that is known
+  CHECK(faults.files() == std::vector<std::string>{"tower.yaml", "nodes.csv", "bars.csv"});
+  try {
+    faults.throw_if_any();
+    FAIL("nothing was thrown");
+  } catch (const InputError& error) {
+    CHECK(std::string(error.what()) ==
+          "tower.yaml:3:4: odd; cure\ntower.yaml:5:6: odd; cure\nbars.csv:7:1: odd; cure\nnodes.csv:9:2: "
+          "odd; cure");
+  }
+}
+
 }  // namespace swaymark::test
