@@ -53,10 +53,12 @@ std::string crossings_note(const Tower& tower, const SegmentReading& reading) {
   // Diagonals that pass each other are common; an end that is drawn onto a bar is meant to be joined to it.
   const bool loose_end = !reading.split && std::any_of(list.begin(), list.end(),
                                                        [](const auto& c) { return c.node.has_value(); });
+  const bool one = list.size() == 1;
+  const std::string outcome =
+      reading.split ? fmt::format("became {}, and the segments were split there", one ? "a node" : "nodes")
+                    : fmt::format("{} not joined, as 'split_crossings: true' would do", one ? "is" : "are");
   std::string note = fmt::format("{}{}: {} of segments that share no node {}: ", loose_end ? "WARNING: " : "",
-                                 reading.file, counted(list.size(), "crossing", "crossings"),
-                                 reading.split ? "became nodes, and the segments were split there"
-                                               : "are not joined, as 'split_crossings: true' would do");
+                                 reading.file, counted(list.size(), "crossing", "crossings"), outcome);
   for (std::size_t i = 0; i < std::min(list.size(), kMostPlaces); ++i)
     note += fmt::format("{}{}", i == 0 ? "" : "; ", crossing_words(tower, list[i]));
   if (list.size() > kMostPlaces) note += fmt::format("; and {} more", list.size() - kMostPlaces);

@@ -38,21 +38,21 @@ void PointGrid::add(std::size_t name, const Eigen::Vector3d& position) {
   head->second = entries_.size() - 1;
 }
 
-std::vector<PointGrid::Cube> PointGrid::cubes_around(const Eigen::Vector3d& position) const {
-  std::vector<Cube> cubes{Cube{}};
+PointGrid::Surroundings PointGrid::cubes_around(const Eigen::Vector3d& position) const {
+  Surroundings result;
   for (std::size_t axis = 0; axis < 3; ++axis) {
     const double coordinate = position[static_cast<Eigen::Index>(axis)];
     const std::int64_t low = cube_along(coordinate - reach_);
     const std::int64_t high = cube_along(coordinate + reach_);
-    const std::size_t count = cubes.size();
+    const std::size_t count = result.count;
     for (std::size_t i = 0; i < count; ++i) {
-      cubes[i][axis] = low;
+      result.cubes[i][axis] = low;
       if (high == low) continue;
-      cubes.push_back(cubes[i]);
-      cubes.back()[axis] = high;
+      result.cubes[result.count] = result.cubes[i];
+      result.cubes[result.count++][axis] = high;
     }
   }
-  return cubes;
+  return result;
 }
 
 }  // namespace swaymark

@@ -24,8 +24,9 @@ class PointGrid {
   /// are among them. The order depends on nothing but the order of adding.
   template <typename Visit>
   void around(const Eigen::Vector3d& position, Visit visit) const {
-    for (const Cube& cube : cubes_around(position)) {
-      const auto head = heads_.find(cube);
+    const Surroundings cubes = cubes_around(position);
+    for (std::size_t c = 0; c < cubes.count; ++c) {
+      const auto head = heads_.find(cubes.cubes[c]);
       if (head == heads_.end()) continue;
       for (std::size_t i = head->second; i != kNone; i = entries_[i].next)
         visit(entries_[i].name, entries_[i].position);
@@ -34,6 +35,10 @@ class PointGrid {
 
  private:
   using Cube = std::array<std::int64_t, 3>;
+  struct Surroundings {
+    std::array<Cube, 8> cubes{};
+    std::size_t count = 1;
+  };
   struct Hash {
     std::size_t operator()(const Cube& cube) const;
   };
@@ -45,7 +50,7 @@ class PointGrid {
   static constexpr std::size_t kNone = static_cast<std::size_t>(-1);
 
   [[nodiscard]] std::int64_t cube_along(double coordinate) const;
-  [[nodiscard]] std::vector<Cube> cubes_around(const Eigen::Vector3d& position) const;
+  [[nodiscard]] Surroundings cubes_around(const Eigen::Vector3d& position) const;
 
   double reach_;
   std::vector<Entry> entries_;

@@ -139,6 +139,39 @@ TEST_CASE("results never take the place of the tower file") {
   CHECK(bytes_of(tower) == lone_mass());
 }
 
+TEST_CASE("a tower is checked with the tables beside it and results never take their place") {
+  const ScratchFolder folder;
+  const std::string tower =
+      folder.write("tower.yaml",
+                   lone_mass({"nodes_from: nodes.csv", "nodes: {a: [0, 0], b: [2, 0]}", "bars_from: bars.csv",
+                              "members: [{group: g, section: bar, material: steel}]"}));
+  const std::string table = "bar,from,to,group\nleft,a,c,g\nright,b,c,g\n";
+  const std::string bars = folder.write("bars.csv", table);
+  folder.write("nodes.csv", "node,x [mm],z [mm]\nc,1000,1000\n");
+  const Outcome whole = run_with({"check", tower, "--json", "-"});
+  CHECK(whole.status == kAllMet);
+  CHECK_THAT(whole.output, Catch::Contains("\"bars\": 2"));
+  CHECK(run_with({"check", tower, "--json", bars}).status == kFileTrouble);
+  CHECK(bytes_of(bars) == table);
+}
+
+TEST_CASE("a fault of a table is told in the table by the path it was read from") {
+  const ScratchFolder folder;
+  const std::string tower = folder.write("tower.yaml", lone_mass({"nodes_from: nodes.csv"}));
+  const std::string nodes = folder.write("nodes.csv", "node,x,z\nd,1 kg,5\n");
+  const Outcome outcome = run_with({"check", tower});
+  CHECK(outcome.status == kRefused);
+  CHECK_THAT(outcome.error, Catch::StartsWith(nodes + ":2:3: "));
+}
+
+TEST_CASE("a table that is not there ends with five") {
+  const ScratchFolder folder;
+  const Outcome outcome =
+      run_with({"check", folder.write("tower.yaml", lone_mass({"bars_from: there-is-none.csv"}))});
+  CHECK(outcome.status == kFileTrouble);
+  CHECK_THAT(outcome.error, Catch::Contains("there-is-none.csv: cannot open"));
+}
+
 TEST_CASE("JSON on standard output stands in place of the report") {
   const Outcome outcome = check_text(lone_mass(), {"--json", "-"});
   CHECK(outcome.status == kAllMet);

@@ -2,8 +2,8 @@
 
 #include <string>
 
-#include "tests/core/beside.hpp"
 #include "tests/core/tower_text.hpp"
+#include "tests/support/beside.hpp"
 
 /// Small towers drawn by line segments.
 namespace swaymark::test {

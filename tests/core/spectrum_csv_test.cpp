@@ -3,8 +3,8 @@
 #include <catch2/catch.hpp>
 
 #include "core/quantity.hpp"
-#include "tests/core/beside.hpp"
 #include "tests/core/tower_text.hpp"
+#include "tests/support/beside.hpp"
 #include "tests/support/matchers.hpp"
 
 namespace swaymark::test {

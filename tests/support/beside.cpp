@@ -1,4 +1,4 @@
-#include "tests/core/beside.hpp"
+#include "tests/support/beside.hpp"
 
 #include <algorithm>
 #include <stdexcept>
