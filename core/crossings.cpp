@@ -17,7 +17,7 @@ using Eigen::Vector3d;
 
 constexpr std::size_t kMostPairs = 300'000'000;  // looked at: some seconds
 constexpr std::size_t kMostVisits = 20'000'000;  // of cells by sticks
-constexpr std::size_t kMostMeetings = 3'000'000;
+constexpr std::size_t kMostMeetings = 1'000'000;
 // Of the grid, in cells: towers like to stand in the planes through the origin, which shall not be borders.
 constexpr double kShift = 0.382;
 

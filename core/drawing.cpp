@@ -1,5 +1,6 @@
 #include "core/drawing.hpp"
 
+#include <algorithm>
 #include <map>
 
 #include <fmt/format.h>

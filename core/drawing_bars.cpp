@@ -1,7 +1,7 @@
 #include "core/drawing_bars.hpp"
 
 #include <algorithm>
-#include <map>
+#include <tuple>
 
 #include <fmt/format.h>
 
@@ -101,24 +101,34 @@ class Cuts {
   }
 
   void replace_bars() {
+    const auto key = [](const Cut& cut) { return std::tie(cut.stick, cut.at, cut.node); };
+    std::sort(cuts_.begin(), cuts_.end(), [&](const Cut& a, const Cut& b) { return key(a) < key(b); });
+    cuts_.erase(
+        std::unique(cuts_.begin(), cuts_.end(), [&](const Cut& a, const Cut& b) { return key(a) == key(b); }),
+        cuts_.end());
     std::vector<Bar>& bars = drawing_.tower.bars;
     const auto first = bars.begin() + static_cast<std::ptrdiff_t>(drawing_.first_bar);
     const std::vector<Bar> whole(first, bars.end());
     bars.erase(first, bars.end());
+    bars.reserve(bars.size() + whole.size() + cuts_.size());
+    auto cut = cuts_.cbegin();
     for (std::size_t s = 0; s < whole.size(); ++s) {
-      const auto found = cuts_.find(s);
-      if (found == cuts_.end()) {
+      if (cut == cuts_.cend() || cut->stick != s) {
         bars.push_back(whole[s]);
-      } else {
-        add_pieces(whole[s], std::move(found->second));
+        continue;
       }
+      Bar piece = whole[s];
+      std::size_t count = 0;
+      for (; cut != cuts_.cend() && cut->stick == s; ++cut) add_piece(piece, cut->node, ++count);
+      add_piece(piece, whole[s].to, ++count);
     }
   }
 
  private:
   struct Cut {
-    std::size_t node;
+    std::size_t stick;
     double at;  // along the bar [m]
+    std::size_t node;
   };
 
   // The earliest node within the tolerance of a place.
@@ -133,29 +143,23 @@ class Cuts {
   void cut(std::size_t stick, std::size_t node) {
     const Bar& bar = drawing_.tower.bars[drawing_.first_bar + stick];
     if (node == bar.from || node == bar.to) return;
-    std::vector<Cut>& list = cuts_[stick];
-    if (std::any_of(list.begin(), list.end(), [&](const Cut& known) { return known.node == node; })) return;
     const auto& nodes = drawing_.tower.nodes;
     const Vector3d& start = nodes[bar.from].position;
     const Vector3d way = nodes[bar.to].position - start;
-    list.push_back({node, (nodes[node].position - start).dot(way.normalized())});
+    cuts_.push_back({stick, (nodes[node].position - start).dot(way.normalized()), node});
   }
 
-  void add_pieces(const Bar& bar, std::vector<Cut> list) {
-    std::sort(list.begin(), list.end(), [](const Cut& a, const Cut& b) { return a.at < b.at; });
-    list.push_back({bar.to, 0.0});
-    Bar piece = bar;
-    for (std::size_t i = 0; i < list.size(); ++i) {
-      piece.name = fmt::format("{}-{}.{}", drawing_.tower.groups[bar.group].name, bar.number, i + 1);
-      piece.to = list[i].node;
-      drawing_.tower.bars.push_back(piece);
-      piece.from = piece.to;
-    }
+  // The next piece begins where this one ends.
+  void add_piece(Bar& piece, std::size_t to, std::size_t count) {
+    piece.name = fmt::format("{}-{}.{}", drawing_.tower.groups[piece.group].name, piece.number, count);
+    piece.to = to;
+    drawing_.tower.bars.push_back(piece);
+    piece.from = to;
   }
 
   Drawing& drawing_;
   PointGrid grid_;
-  std::map<std::size_t, std::vector<Cut>> cuts_;  // by stick
+  std::vector<Cut> cuts_;
   std::size_t made_ = 0;
 };
 

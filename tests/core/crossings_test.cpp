@@ -118,7 +118,8 @@ TEST_CASE("the grid finds what comparing every pair finds") {
       // Both ends of each lie on different sides of the other.
       const auto side = [&](const Stick& line, std::size_t point) {
         const Eigen::Vector3d u = points[line.to] - points[line.from];
-        return u.cross(points[point] - points[line.from]).y() > 0.0;
+        const Eigen::Vector3d v = points[point] - points[line.from];
+        return u.z() * v.x() - u.x() * v.z() > 0.0;
       };
       if (side(sticks[a], sticks[b].from) != side(sticks[a], sticks[b].to) &&
           side(sticks[b], sticks[a].from) != side(sticks[b], sticks[a].to))

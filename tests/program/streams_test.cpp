@@ -38,7 +38,8 @@ TEST_CASE("a tower from standard input gives the report of the file but for its 
 
 TEST_CASE("a tower from standard input finds its tables from the folder of the run") {
   const ScratchFolder folder;
-  const std::string tower = sound_tower_with("nodes: {a: [0, 0], b: [2, 0], c: [1, 1]}", "nodes_from: nodes.csv");
+  const std::string tower =
+      sound_tower_with("nodes: {a: [0, 0], b: [2, 0], c: [1, 1]}", "nodes_from: nodes.csv");
   folder.write("tower.yaml", tower);
   folder.write("nodes.csv", "node,x [mm],z [mm]\na,0,0\nb,2000,0\nc,1000,1000\n");
   const Outcome piped =
