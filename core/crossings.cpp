@@ -52,17 +52,25 @@ class Search {
     for (std::size_t s = 0; s < sticks_.size() && found_.complete; ++s) enter_stick(s);
     enter_loose_points();
     std::sort(visits_.begin(), visits_.end());
-    for (std::size_t begin = 0; begin < visits_.size() && found_.complete;) {
-      std::size_t end = begin + 1;
-      while (end < visits_.size() && visits_[end].cell == visits_[begin].cell) ++end;
-      look_into(begin, end);
-      begin = end;
-    }
+    each_cell([&](std::size_t begin, std::size_t end) { pairs_ += (end - begin) * (end - begin) / 2; });
+    if (pairs_ > kMostPairs) found_.complete = false;  // known before any time is spent on them
+    each_cell([&](std::size_t begin, std::size_t end) { look_into(begin, end); });
     put_in_order();
     return std::move(found_);
   }
 
  private:
+  // Calls `look(begin, end)` for the visits of every cell, as long as the search goes on.
+  template <typename Look>
+  void each_cell(Look look) const {
+    for (std::size_t begin = 0; begin < visits_.size() && found_.complete;) {
+      std::size_t end = begin + 1;
+      while (end < visits_.size() && visits_[end].cell == visits_[begin].cell) ++end;
+      look(begin, end);
+      begin = end;
+    }
+  }
+
   [[nodiscard]] std::int64_t cell_of(double coordinate) const {
     return static_cast<std::int64_t>(std::floor(coordinate / width_ + kShift));
   }
@@ -120,8 +128,7 @@ class Search {
 
   void look_into(std::size_t begin, std::size_t end) {
     for (std::size_t i = begin; i < end && visits_[i].what < sticks_.size(); ++i) {
-      pairs_ += end - i - 1;
-      if (pairs_ > kMostPairs || found_.list.size() > kMostMeetings) {
+      if (found_.list.size() > kMostMeetings) {
         found_.complete = false;
         return;
       }
