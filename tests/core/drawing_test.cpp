@@ -16,12 +16,12 @@ const std::string kHeader = "x1 [mm],z1 [mm],x2 [mm],z2 [mm],group\n";
 
 TEST_CASE("end points within the tolerance are one node where the first is drawn") {
   const Tower tower = bare_drawn(kHeader +
-                                 "0,0,1000,0,g\n1000.4,0,2000,0,g\n2000,0,1000,0.3,g\n"
+                                 "0,0,1000,0,g\n1000.4,0,2000,0,g\n2000,900,1000,0.3,g\n"
                                  "1000,500,0,0,g\n");
-  REQUIRE(tower.nodes.size() == 4);
+  REQUIRE(tower.nodes.size() == 5);
   CHECK_THAT(tower.nodes[1].position.x(), is_near(1.0, kRoundoff));
   CHECK(tower.nodes[1].position.z() == 0.0);
-  CHECK(tower.segments->nodes == 4);
+  CHECK(tower.segments->nodes == 5);
   CHECK(tower.segments->moved == 2);
   CHECK_THAT(tower.segments->largest_move, is_near(0.4e-3, 1e-9));
   CHECK(tower.segments->largest_move_node == 1);

@@ -197,8 +197,6 @@ TEST_CASE("spectra of a later version are refused key by key and draw no other f
                  "8:52 'ground': spectra by the formulas of a code are not yet supported",
                  "8:63 'ag': spectra by the formulas of a code are not yet supported",
                  "8:74 'q': spectra by the formulas of a code are not yet supported"});
-  CHECK(refusals_with(spectrum("damping: 5 %, points_from: quay.csv")) ==
-        Refusals{"8:32 'points_from': points from a CSV file are not yet supported"});
 }
 
 TEST_CASE("no spectrum may be called none") {

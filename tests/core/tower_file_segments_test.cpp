@@ -92,7 +92,8 @@ TEST_CASE("a tolerance must be a length that tells nodes apart") {
   CHECK_THAT(drawing_refusal(lines, "merge_within: 0\n"), Catch::Contains("0.001 mm at least"));
   CHECK_THAT(drawing_refusal(lines, "merge_within: -1 mm\n"), Catch::Contains("0.001 mm at least"));
   CHECK_THAT(drawing_refusal(lines, "merge_within: 1 kg\n"), Catch::Contains("'merge_within'"));
-  CHECK_THAT(drawing_refusal(lines, "split_crossings: maybe\n"), Catch::Contains("true or false"));
+  CHECK_THAT(drawing_refusal(lines, "split_crossings: maybe\n"),
+             Catch::Contains("9:18 'split_crossings' cannot be 'maybe'"));
 }
 
 TEST_CASE("faults of a table of segments are told at their place in the table") {
@@ -101,7 +102,7 @@ TEST_CASE("faults of a table of segments are told at their place in the table") 
   CHECK(drawing_refusal("x1,z1,x2,group\n0,0,1,g\n") ==
         "lines.csv:1:1 'z2' is missing in a table of segments in 2 dimensions");
   CHECK(drawing_refusal("x1,z1,x2,z2,group\n0,0,1,1,h\n2,0,1,1,\n") ==
-        "lines.csv:2:9 unknown group 'h'\nlines.csv:3:9 nothing stands behind 'group'");
+        "lines.csv:2:9 there is no group 'h'\nlines.csv:3:9 nothing stands behind 'group'");
   CHECK_THAT(drawing_refusal("x1,z1,x2,z2,group\n0,0,1,2e6,g\n"), Catch::StartsWith("lines.csv:2:7 "));
   CHECK_THAT(drawing_refusal("x1,z1,x2,z2,group\n0,0,1,up,g\n"), Catch::StartsWith("lines.csv:2:7 "));
 }

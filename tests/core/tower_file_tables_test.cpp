@@ -117,13 +117,13 @@ TEST_CASE("faults of a table of bars are told at their place in the table") {
   CHECK(refusal_of_bars("bar,from,to\nr,a,c\n") == "bars.csv:1:1 'group' is missing in a table of bars");
   CHECK(refusal_of_bars("bar [m],from,to,group\nr,a,c,g\n") ==
         "bars.csv:1:1 the column 'bar' holds words, which have no unit");
-  CHECK(refusal_of_bars(kBars + "r,a,d,g\n") == "bars.csv:4:5 unknown node 'd'");
-  CHECK(refusal_of_bars(kBars + "r,a,b,legs\n") == "bars.csv:4:7 unknown group 'legs'");
+  CHECK(refusal_of_bars(kBars + "r,a,d,g\n") == "bars.csv:4:5 there is no node 'd'");
+  CHECK(refusal_of_bars(kBars + "r,a,b,legs\n") == "bars.csv:4:7 there is no group 'legs'");
   CHECK(refusal_of_bars(kBars + ",a,b,g\n") == "bars.csv:4:1 nothing stands behind 'bar'");
   CHECK(refusal_of_bars(kBars + "r,,b,\n") ==
         "bars.csv:4:3 nothing stands behind 'from'\nbars.csv:4:6 nothing stands behind 'group'");
-  CHECK(refusal_of_bars(kBars + "r,b,b,g\n") == "bars.csv:4:1 bar 'r' joins node 'b' to itself");
-  CHECK_THAT(refusal_of_bars(kBars + "r,c,a,g\n"), Catch::StartsWith("bars.csv:4:1 bar 'r'"));
+  CHECK(refusal_of_bars(kBars + "r,b,b,g\n") == "bars.csv:4:1 bar r joins node 'b' to itself");
+  CHECK_THAT(refusal_of_bars(kBars + "r,c,a,g\n"), Catch::StartsWith("bars.csv:4:1 bar r joins"));
 }
 
 TEST_CASE("every bar has a name of its own") {

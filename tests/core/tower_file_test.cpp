@@ -85,10 +85,8 @@ TEST_CASE("unknown keys are found at every level") {
 }
 
 TEST_CASE("every key of a later version is refused at its line") {
-  const std::vector<std::string> lines{"nodes_from: nodes.csv",      "bars_from: bars.csv",
-                                       "segments_from: lines.csv",   "split_crossings: true",
-                                       "scenarios: [{label: iced}]", "stabilise: 1",
-                                       "member_bending: true",       "uncertainty: {}"};
+  const std::vector<std::string> lines{"scenarios: [{label: iced}]", "stabilise: 1", "member_bending: true",
+                                       "uncertainty: {}"};
   for (const std::string& line : lines) {
     const Refusals refusals = refusals_with(line);
     INFO(line);
