@@ -3,6 +3,7 @@
 #include <array>
 #include <cstdlib>
 #include <iostream>
+#include <numeric>
 #include <string>
 
 #include "core/tower_file.hpp"
@@ -47,6 +48,12 @@ void read_with(std::string_view use, std::string_view table) {
 
 extern "C" int LLVMFuzzerTestOneInput(const std::uint8_t* data, std::size_t size) {
   const std::string_view table(reinterpret_cast<const char*>(data), size);
-  for (const std::string_view use : kUses) read_with(use, table);
+  // Every use of every table would take long: the uses that its columns fit, and one that its bytes choose.
+  const bool segments = table.find("x1") != std::string_view::npos;
+  const bool bars = table.find("from") != std::string_view::npos;
+  if (segments) read_with(kUses[3], table);
+  if (bars) read_with(kUses[1], table);
+  const auto sum = std::accumulate(data, data + size, std::size_t{0});
+  read_with(kUses[sum % kUses.size()], table);
   return 0;
 }
