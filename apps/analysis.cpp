@@ -8,6 +8,7 @@
 
 #include "apps/notes.hpp"
 #include "apps/segment_notes.hpp"
+#include "apps/shared_work.hpp"
 #include "modal/damping.hpp"
 #include "modal/mode_character.hpp"
 #include "modal/participation.hpp"
@@ -136,24 +137,12 @@ void require_finite(const Analysis& analysis) {
                             "look for values that are larger or smaller than any structure's"});
 }
 
-}  // namespace
-
-std::vector<Index> Analysis::excited() const {
-  std::vector<Index> shaken;
-  std::vector<Index> horizontal;
-  const auto axes = tower.axes();
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    if (tower.seismic && tower.seismic->spectrum[static_cast<std::size_t>(axes[k])])
-      shaken.push_back(static_cast<Index>(k));
-    if (axes[k] != Axis::z) horizontal.push_back(static_cast<Index>(k));
-  }
-  return shaken.empty() ? horizontal : shaken;
-}
-
-Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
+// The whole analysis; `shared` may be nothing.
+Analysis analysis_of(Tower tower, Provenance provenance, Scope scope, SharedWork* shared) {
   Assembly assembly = assemble(tower);
   MassLedger ledger = mass_ledger(tower, assembly);
-  MechanismReport mechanisms = find_mechanisms(tower, assembly);
+  MechanismReport mechanisms =
+      shared != nullptr ? shared->mechanisms(tower, assembly) : find_mechanisms(tower, assembly);
   Analysis analysis{scope,
                     std::move(tower),
                     std::move(provenance),
@@ -184,7 +173,9 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
     drive.col(static_cast<Index>(k)) =
         inertia_vector(analysis.assembly, rigid_translation(analysis.assembly.dofs, axes[k]));
   }
-  const Eigenproblem problem(stiffness, mass);
+  const Eigenproblem problem = shared != nullptr
+                                   ? Eigenproblem(stiffness, mass, shared->factor(analysis.assembly))
+                                   : Eigenproblem(stiffness, mass);
   if (problem.mode_count() == 0) {
     throw ComputationError({"nothing that is free to move has mass",
                             "give the material a density, or carry a mass at a free node"});
@@ -207,6 +198,28 @@ Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
   analysis.verdicts = verdicts_of(analysis);
   analysis.notes = notes_of(analysis);
   return analysis;
+}
+
+}  // namespace
+
+std::vector<Index> Analysis::excited() const {
+  std::vector<Index> shaken;
+  std::vector<Index> horizontal;
+  const auto axes = tower.axes();
+  for (std::size_t k = 0; k < axes.size(); ++k) {
+    if (tower.seismic && tower.seismic->spectrum[static_cast<std::size_t>(axes[k])])
+      shaken.push_back(static_cast<Index>(k));
+    if (axes[k] != Axis::z) horizontal.push_back(static_cast<Index>(k));
+  }
+  return shaken.empty() ? horizontal : shaken;
+}
+
+Analysis analyse(Tower tower, Provenance provenance, Scope scope) {
+  return analysis_of(std::move(tower), std::move(provenance), scope, nullptr);
+}
+
+Analysis analyse(Tower tower, Provenance provenance, Scope scope, SharedWork& shared) {
+  return analysis_of(std::move(tower), std::move(provenance), scope, &shared);
 }
 
 }  // namespace swaymark

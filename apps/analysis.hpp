@@ -53,4 +53,8 @@ struct Analysis {
 /// \throws ComputationError where nothing can be computed for another reason.
 [[nodiscard]] Analysis analyse(Tower tower, Provenance provenance, Scope scope);
 
+class SharedWork;
+/// The same for one of several states of a tower, with what they share.
+[[nodiscard]] Analysis analyse(Tower tower, Provenance provenance, Scope scope, SharedWork& shared);
+
 }  // namespace swaymark

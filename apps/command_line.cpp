@@ -7,6 +7,7 @@
 #include <fmt/format.h>
 
 #include "apps/exit_status.hpp"
+#include "apps/starter.hpp"
 #include "core/text.hpp"
 
 namespace swaymark {
@@ -15,16 +16,20 @@ namespace {
 
 constexpr const char* kHelp = R"(Usage: swaymark check TOWER.yaml [options]
        swaymark modes TOWER.yaml [options]
+       swaymark new KIND
 
 Modal analysis and response-spectrum checks of truss towers.
 
   swaymark check tower.yaml                       the whole report
   swaymark check tower.yaml --json results.json   and the figures for other programs
   swaymark modes tower.yaml --csv out --shapes    frequencies, and shapes as tables
+  swaymark new tank-stand > tower.yaml            a commented tower file to begin with
 
 Commands
   check TOWER.yaml   all that the tower file asks for: modes, excitation bands, seismic response
   modes TOWER.yaml   frequencies, participation and effective mass only
+  new KIND           a commented tower file to begin with, on standard output; kinds:
+@KINDS@
   help [COMMAND]     this text
 
 Options
@@ -49,10 +54,38 @@ Parsed usage_error(const std::string& what) {
   return {std::nullopt, "", fmt::format("swaymark: {}; 'swaymark --help' shows the commands", what), kUsage};
 }
 
-Parsed help() { return {std::nullopt, kHelp, "", kAllMet}; }
+Parsed help() {
+  std::string kinds;
+  for (const Starter& starter : starters())
+    kinds += fmt::format("{}                       {:<18}  {}", kinds.empty() ? "" : "\n", starter.kind,
+                         starter.what);
+  std::string text = kHelp;
+  const std::string mark = "@KINDS@";
+  return {std::nullopt, text.replace(text.find(mark), mark.size(), kinds), "", kAllMet};
+}
+
+std::vector<std::string> kinds_of_starters() {
+  std::vector<std::string> kinds;
+  for (const Starter& starter : starters()) kinds.push_back(starter.kind);
+  return kinds;
+}
+
+// swaymark new KIND: a text to print, as help is.
+Parsed parse_new(const std::vector<std::string>& arguments) {
+  const auto kinds = kinds_of_starters();
+  const std::string known = fmt::format("the kinds are {}", fmt::join(kinds, ", "));
+  if (arguments.empty()) return usage_error("'new' wants a kind of tower: " + known);
+  if (arguments.size() > 1) return usage_error("'new' takes one kind of tower and nothing else");
+  const std::string& kind = arguments.front();
+  if (const auto starter = starter_of(kind)) return {std::nullopt, std::string(starter->text), "", kAllMet};
+  if (kind.starts_with('-')) return usage_error(fmt::format("'new' has no option '{}'", excerpt(kind)));
+  const auto close = nearest(kind, kinds);
+  return usage_error(fmt::format("unknown kind of tower '{}'{}; {}", excerpt(kind),
+                                 close ? fmt::format(", did you mean '{}'?", *close) : "", known));
+}
 
 std::optional<Parsed> known_later(const std::string& command) {
-  if (command != "compare" && command != "new") return std::nullopt;
+  if (command != "compare") return std::nullopt;
   return usage_error(fmt::format("the command '{}' is not yet supported", command));
 }
 
@@ -163,13 +196,14 @@ Parsed parse_command_line(int argc, const char* const* argv) {
   if (given("--version")) return {std::nullopt, "swaymark " + program_version() + "\n", "", kAllMet};
   Command command;
   const std::string word = arguments.front();
+  if (word == "new") return parse_new({arguments.begin() + 1, arguments.end()});
   if (word == "modes") {
     command.scope = Scope::modes;
   } else if (word != "check") {
     if (auto later = known_later(word)) return *later;
     if (word.starts_with('-'))
       return usage_error(fmt::format("no command stands before '{}'", excerpt(word)));
-    const auto close = nearest(word, {"check", "modes", "help"});
+    const auto close = nearest(word, {"check", "modes", "new", "help"});
     return usage_error(fmt::format("unknown command '{}'{}", excerpt(word),
                                    close ? fmt::format(", did you mean '{}'?", *close) : ""));
   }

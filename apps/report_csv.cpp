@@ -6,6 +6,7 @@
 #include <fmt/format.h>
 
 #include "apps/report_parts.hpp"
+#include "apps/scenario_figures.hpp"
 
 namespace swaymark {
 
@@ -232,6 +233,45 @@ NamedText shapes_sheet(const Analysis& a) {
   return sheet.take();
 }
 
+std::string name_with_unit(const FigureRow& row) { return fmt::format("{} [{}]", row.name, row.unit); }
+
+NamedText scenarios_sheet(const Study& study) {
+  Sheet sheet("scenarios", {"scenario", "figure", "value", "change"});
+  sheet.end_row();
+  const auto rows = figure_rows(study);
+  const auto labels = study.labels();
+  const auto states = study.states();
+  for (std::size_t s = 0; s < labels.size(); ++s) {
+    for (const FigureRow& row : rows) {
+      if (!row.values[s]) continue;
+      sheet.add(labels[s]);
+      sheet.add(name_with_unit(row));
+      sheet.add(row.values[s]);
+      sheet.add(row.change(s));
+      sheet.end_row();
+    }
+    if (states[s] != nullptr) continue;
+    for (const char* cell : {labels[s].c_str(), "not computed", "", ""}) sheet.add(std::string_view(cell));
+    sheet.end_row();
+  }
+  return sheet.take();
+}
+
+NamedText scenario_checks_sheet(const Study& study) {
+  Sheet sheet("scenario_checks", {"scenario", "check", "outcome"});
+  sheet.end_row();
+  const auto rows = outcome_rows(study);
+  const auto labels = study.labels();
+  for (std::size_t s = 0; s < labels.size(); ++s) {
+    for (const OutcomeRow& row : rows) {
+      if (row.outcomes[s].empty()) continue;
+      for (const std::string& cell : {labels[s], row.check, row.outcomes[s]}) sheet.add(cell);
+      sheet.end_row();
+    }
+  }
+  return sheet.take();
+}
+
 }  // namespace
 
 std::vector<NamedText> csv_report(const Analysis& a, bool shapes) {
@@ -244,6 +284,15 @@ std::vector<NamedText> csv_report(const Analysis& a, bool shapes) {
   if (a.base_study) sheets.push_back(base_study_sheet(a));
   if (a.scope == Scope::check) sheets.push_back(verdicts_sheet(a));
   if (shapes) sheets.push_back(shapes_sheet(a));
+  return sheets;
+}
+
+std::vector<NamedText> csv_report(const Study& study, bool shapes) {
+  std::vector<NamedText> sheets;
+  if (!study.stated.mechanisms.any()) sheets = csv_report(study.stated, shapes);
+  if (study.scenarios.empty()) return sheets;
+  sheets.push_back(scenarios_sheet(study));
+  if (study.stated.scope == Scope::check) sheets.push_back(scenario_checks_sheet(study));
   return sheets;
 }
 

@@ -231,11 +231,8 @@ Json mechanisms(const Analysis& a) {
   return list;
 }
 
-}  // namespace
-
-std::string json_report(const Analysis& a, bool shapes) {
-  Json root{{"swaymark", a.provenance.version}, {"title", a.tower.title}};
-  root["input"] = {{"file", a.provenance.file}, {"sha256", a.provenance.sha256}, {"date", a.provenance.date}};
+// Of one state of the tower.
+void add_result(const Analysis& a, bool shapes, Json& root) {
   root["model"] = {{"dimensions", a.tower.dimensions},
                    {"nodes", stated_nodes(a.tower)},
                    {"bars", a.tower.bars.size()},
@@ -253,8 +250,36 @@ std::string json_report(const Analysis& a, bool shapes) {
     if (a.scope == Scope::check) root["verdicts"] = verdicts(a);
   }
   root["notes"] = a.notes;
-  // A file name is bytes, and JSON is UTF-8: what does not fit is replaced.
+}
+
+Json report(const Analysis& a, bool shapes) {
+  Json root{{"swaymark", a.provenance.version}, {"title", a.tower.title}};
+  root["input"] = {{"file", a.provenance.file}, {"sha256", a.provenance.sha256}, {"date", a.provenance.date}};
+  add_result(a, shapes, root);
+  return root;
+}
+
+// A file name is bytes, and JSON is UTF-8: what does not fit is replaced.
+std::string text_of(const Json& root) {
   return root.dump(2, ' ', false, Json::error_handler_t::replace) + "\n";
+}
+
+}  // namespace
+
+std::string json_report(const Analysis& analysis, bool shapes) { return text_of(report(analysis, shapes)); }
+
+std::string json_report(const Study& study, bool shapes) {
+  Json root = report(study.stated, shapes);
+  for (const ScenarioResult& scenario : study.scenarios) {
+    Json object{{"label", scenario.label}};
+    if (scenario.analysis) {
+      add_result(*scenario.analysis, shapes, object);
+    } else {
+      object["failure"] = scenario.failure;
+    }
+    root["scenarios"].push_back(std::move(object));
+  }
+  return text_of(root);
 }
 
 }  // namespace swaymark

@@ -2,7 +2,7 @@
 
 #include <string>
 
-#include "apps/analysis.hpp"
+#include "apps/study.hpp"
 
 namespace swaymark {
 
@@ -10,5 +10,8 @@ namespace swaymark {
 /// A tower that can move has its mechanisms instead of modes.
 /// \param shapes whether the mode shapes are written.
 [[nodiscard]] std::string json_report(const Analysis& analysis, bool shapes);
+
+/// The same of the tower as stated, with the whole result of each scenario under `scenarios`.
+[[nodiscard]] std::string json_report(const Study& study, bool shapes);
 
 }  // namespace swaymark

@@ -70,8 +70,9 @@ std::string bars_table(const Analysis& a) {
                {{"density", "[kg/m3]"}, Align::right}});
   for (const Kind& kind : kinds_of(a)) {
     table.add({a.tower.groups[kind.group].name, std::to_string(kind.bars), figure(kind.length, 2),
-               kind.section->name, fmt::format("{:.4g}", 1e4 * kind.section->area), kind.material->name,
-               fmt::format("{:.4g}", 1e-9 * kind.material->youngs_modulus),
+               kind.section->name,
+               fmt::format("{:.4g}", 1e4 * kind.section->area * a.tower.groups[kind.group].area_factor),
+               kind.material->name, fmt::format("{:.4g}", 1e-9 * kind.material->youngs_modulus),
                fmt::format("{:.4g}", kind.material->density)});
   }
   return table.text();

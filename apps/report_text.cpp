@@ -9,6 +9,7 @@
 #include "apps/report_base.hpp"
 #include "apps/report_model.hpp"
 #include "apps/report_parts.hpp"
+#include "apps/report_scenarios.hpp"
 #include "apps/report_seismic.hpp"
 #include "apps/report_summary.hpp"
 #include "apps/table.hpp"
@@ -21,10 +22,12 @@ using Align = Table::Align;
 
 class TextReport {
  public:
-  TextReport(const Analysis& analysis, const TextStyle& style) : a_(analysis), style_(style) {}
+  TextReport(const Analysis& analysis, const Study* study, const TextStyle& style)
+      : a_(analysis), study_(study), style_(style) {}
 
   std::string write() {
     head();
+    if (study_ != nullptr && a_.scope == Scope::check) out_ += scenario_line(*study_);
     out_ += summary_section(a_);
     out_ += model_section(a_);
     ledger();
@@ -36,16 +39,28 @@ class TextReport {
       checks();
     }
     notes();
+    if (study_ != nullptr) out_ += scenario_section(*study_);
+    limits();
+    return out_;
+  }
+
+  std::string write_scenarios_alone() {
+    name();
+    out_ += scenario_section(*study_);
     limits();
     return out_;
   }
 
  private:
-  void head() {
+  void name() {
     const Provenance& p = a_.provenance;
     out_ += a_.tower.title.empty() ? "Tower without a title\n" : a_.tower.title + "\n";
     out_ += fmt::format("  file     {}\n  sha256   {}\n", p.file, p.sha256);
     out_ += fmt::format("  date     {}, swaymark {}\n", p.date, p.version);
+  }
+
+  void head() {
+    name();
     if (a_.scope != Scope::check) return;
     const auto failed =
         std::count_if(a_.verdicts.begin(), a_.verdicts.end(), [](const Verdict& v) { return !v.met; });
@@ -197,6 +212,7 @@ class TextReport {
   }
 
   const Analysis& a_;
+  const Study* study_;  // nothing where the tower has no scenarios
   TextStyle style_;
   std::string out_;
 };
@@ -204,7 +220,13 @@ class TextReport {
 }  // namespace
 
 std::string text_report(const Analysis& analysis, const TextStyle& style) {
-  return TextReport(analysis, style).write();
+  return TextReport(analysis, nullptr, style).write();
+}
+
+std::string text_report(const Study& study, const TextStyle& style) {
+  if (study.scenarios.empty()) return text_report(study.stated, style);
+  TextReport report(study.stated, &study, style);
+  return study.stated.mechanisms.any() ? report.write_scenarios_alone() : report.write();
 }
 
 }  // namespace swaymark

@@ -21,7 +21,9 @@
 #include "apps/report_csv.hpp"
 #include "apps/report_json.hpp"
 #include "apps/report_mechanism.hpp"
+#include "apps/report_scenarios.hpp"
 #include "apps/report_text.hpp"
+#include "apps/scenario_figures.hpp"
 #include "core/tower_file.hpp"
 
 namespace swaymark {
@@ -41,10 +43,12 @@ bool wants_colour(ColourChoice choice) {
   return isatty(STDOUT_FILENO) != 0 && variable("NO_COLOR").empty() && variable("TERM") != "dumb";
 }
 
-int status_of(const Analysis& analysis) {
-  if (analysis.mechanisms.any()) return kNotComputable;
+// A state that cannot be computed weighs more than a check that is not met.
+int status_of(const Study& study) {
+  const auto states = study.states();
+  if (std::find(states.begin(), states.end(), nullptr) != states.end()) return kNotComputable;
   const bool all_met =
-      std::all_of(analysis.verdicts.begin(), analysis.verdicts.end(), [](const Verdict& v) { return v.met; });
+      std::all_of(states.begin(), states.end(), [](const Analysis* state) { return unmet(*state) == 0; });
   return all_met ? kAllMet : kNotMet;
 }
 
@@ -76,25 +80,28 @@ class Inputs {
   std::vector<std::string> files_;
 };
 
-void write_results(const Command& command, const Analysis& analysis, const Inputs& inputs) {
+void write_results(const Command& command, const Study& study, const Inputs& inputs) {
   OutputFiles files;
   const auto stage = [&](const std::string& target, std::string text) {
     inputs.require_apart(target);
     files.stage(target, std::move(text));
   };
+  const auto states = study.states();
+  const bool any_modes =
+      std::any_of(states.begin(), states.end(), [](const auto* state) { return state != nullptr; });
   const bool json_to_output = command.json && *command.json == "-";
-  const std::string json = command.json ? json_report(analysis, command.shapes) : std::string();
+  const std::string json = command.json ? json_report(study, command.shapes) : std::string();
   if (command.json && !json_to_output) stage(*command.json, json);
-  if (command.csv && !analysis.mechanisms.any()) {
+  if (command.csv && any_modes) {
     files.stage_folder(*command.csv);
-    for (NamedText& sheet : csv_report(analysis, command.shapes))
+    for (NamedText& sheet : csv_report(study, command.shapes))
       stage(*command.csv + "/" + sheet.name, std::move(sheet.text));
   }
   files.commit();
   if (json_to_output) {
     write_standard_output(json);
-  } else if (!analysis.mechanisms.any()) {
-    write_standard_output(text_report(analysis, {wants_colour(command.colour)}));
+  } else if (any_modes) {
+    write_standard_output(text_report(study, {wants_colour(command.colour)}));
   }
 }
 
@@ -102,12 +109,13 @@ int run_command(const Command& command) {
   Inputs inputs;
   const std::string name = command.tower == "-" ? "standard input" : command.tower;
   const std::string bytes = inputs.read_tower_file(command.tower);
-  Tower tower =
-      read_tower(bytes, name, [&](const std::string& path) { return inputs.read_other_file(path); });
-  const Analysis analysis = analyse(std::move(tower), provenance_of(name, bytes), command.scope);
-  if (analysis.mechanisms.any()) to_standard_error(mechanism_text(analysis));
-  write_results(command, analysis, inputs);
-  return status_of(analysis);
+  TowerFile file =
+      read_tower_file(bytes, name, [&](const std::string& path) { return inputs.read_other_file(path); });
+  const Study study = study_of(std::move(file), provenance_of(name, bytes), command.scope);
+  if (study.stated.mechanisms.any()) to_standard_error(mechanism_text(study.stated));
+  to_standard_error(scenario_failures(study));
+  write_results(command, study, inputs);
+  return status_of(study);
 }
 
 void report_faults(const InputError& error) {

@@ -31,14 +31,15 @@ std::vector<BarElement> bar_elements(const Tower& tower) {
   elements.reserve(tower.bars.size());
   for (const Bar& bar : tower.bars) {
     const Material& material = tower.material_of(bar);
-    const double area = tower.section_of(bar).area;
+    const double area = tower.area_of(bar);
+    const double modulus = material.youngs_modulus * tower.groups[bar.group].stiffness_factor;
     const Eigen::Vector3d span = tower.nodes[bar.to].position - tower.nodes[bar.from].position;
     BarElement element;
     element.from = bar.from;
     element.to = bar.to;
     element.length = span.norm();
     element.direction = span / element.length;
-    element.axial_stiffness = material.youngs_modulus * area / element.length;
+    element.axial_stiffness = modulus * area / element.length;
     element.own_mass = material.density * area * element.length;
     element.carried_mass = share[bar.group] * element.own_mass + per_length[bar.group] * element.length;
     for (const IceMass& ice : tower.ice) element.carried_mass += ice_on_bar(tower, ice, bar, element.length);

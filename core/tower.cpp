@@ -24,6 +24,8 @@ bool Tower::sloshes(std::size_t node) const {
                      [&](const Liquid& liquid) { return liquid.node == node; });
 }
 
+double Tower::area_of(const Bar& bar) const { return section_of(bar).area * groups[bar.group].area_factor; }
+
 double Tower::extent() const {
   if (nodes.empty()) return 0.0;
   Eigen::Vector3d low = nodes.front().position;

@@ -48,6 +48,8 @@ struct Group {
   std::size_t section = 0;
   std::size_t material = 0;
   Place place;
+  double area_factor = 1.0;       ///< > 0, on the area of its bars (corrosion): mass and stiffness follow
+  double stiffness_factor = 1.0;  ///< > 0, on their axial stiffness alone (slip of joints)
 };
 
 struct Bar {
@@ -198,6 +200,8 @@ struct Tower {
   [[nodiscard]] const Material& material_of(const Bar& bar) const;
   /// Whether the node stands for the sloshing mass of a liquid.
   [[nodiscard]] bool sloshes(std::size_t node) const;
+  /// [m2], the group's area factor applied
+  [[nodiscard]] double area_of(const Bar& bar) const;
   /// The tower's extent [m]: the diagonal of the box around its nodes.
   [[nodiscard]] double extent() const;
 };

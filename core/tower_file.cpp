@@ -1,10 +1,12 @@
 #include "core/tower_file.hpp"
 
+#include "core/tower_file_damping.hpp"
 #include "core/tower_file_lattice.hpp"
 #include "core/tower_file_masses.hpp"
 #include "core/tower_file_members.hpp"
 #include "core/tower_file_parts.hpp"
 #include "core/tower_file_requests.hpp"
+#include "core/tower_file_scenarios.hpp"
 #include "core/tower_file_segments.hpp"
 #include "core/tower_file_supports.hpp"
 #include "core/tower_file_tables.hpp"
@@ -39,21 +41,6 @@ void read_head(MapView& file, Tower& tower) {
   }
 }
 
-void read_damping(MapView& file, Tower& tower) {
-  const YamlNode* node = file.find("damping");
-  if (node == nullptr) return;
-  const std::vector<YamlNode> single{*node};
-  const auto* items = &single;
-  if (node->kind == YamlNode::Kind::sequence) {
-    items = read_list(*node, "damping", "damping ratios", file.faults());
-  }
-  if (items == nullptr) return;
-  for (const YamlNode& item : *items) {
-    const auto ratio = read_value(item, "damping", Quantity::fraction, Range::below_one, file.faults());
-    if (ratio) tower.damping.push_back(*ratio);
-  }
-}
-
 void read_stiffening(MapView& file) {
   const YamlNode* node = file.find("stiffening");
   if (node == nullptr) return;
@@ -65,7 +52,6 @@ void read_stiffening(MapView& file) {
 }
 
 void refuse_later_keys(MapView& file) {
-  file.refuse_later("scenarios", "scenarios are");
   file.refuse_later("stabilise", "springs at loose nodes are");
   file.refuse_later("member_bending", "bending of members is");
   file.refuse_later("uncertainty", "intervals of frequency are");
@@ -84,9 +70,14 @@ void read_bars_elsewhere(MapView& file, const FileSource& source, PartNames& par
 }  // namespace
 
 Tower read_tower(std::string_view text, const std::string& name, const FileSource& source) {
+  return read_tower_file(text, name, source).tower;
+}
+
+TowerFile read_tower_file(std::string_view text, const std::string& name, const FileSource& source) {
   FaultList faults(name);
   const YamlNode root = parse_yaml(text, name, faults);
-  Tower tower;
+  TowerFile result;
+  Tower& tower = result.tower;
   tower.file = name;
   if (root.kind != YamlNode::Kind::map) throw InputError({{name, {1, 1}, wording::not_a_tower()}});
   MapView file(root, "a tower file", faults);
@@ -103,7 +94,7 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   read_bars_elsewhere(file, source, parts, groups, tower);
   read_supports(file, parts.nodes, tower);
   read_base_study(file, tower);
-  read_masses(file, parts.nodes, groups, tower);
+  read_masses(file, "masses", parts.nodes, groups, tower);
   read_mass_matrix(file, tower);
   read_damping(file, tower);
   read_stiffening(file);
@@ -111,12 +102,14 @@ Tower read_tower(std::string_view text, const std::string& name, const FileSourc
   read_bands(file, tower);
   NameTable spectra("spectrum");
   read_spectra(file, source, tower, spectra);
-  read_seismic(file, tower, spectra);
+  read_seismic(file, tower, spectra, file.has("damping"));
+  refuse_scenario_keys(file);
+  tower.files = faults.files();
+  result.scenarios = read_scenarios(file, {parts, groups, spectra}, tower);
   file.refuse_unknown();
   validate(tower, faults);
-  tower.files = faults.files();
   faults.throw_if_any();
-  return tower;
+  return result;
 }
 
 }  // namespace swaymark

@@ -169,10 +169,21 @@ void read_mass(const YamlNode& item, const NameTable& node_names, const NameTabl
 
 }  // namespace
 
-void read_masses(MapView& file, const NameTable& nodes, const NameTable& groups, Tower& tower) {
-  const YamlNode* masses = file.find("masses");
+void drop_masses(Tower& tower) {
+  // What sloshes stands behind all nodes of the tower's own.
+  while (!tower.nodes.empty() && tower.sloshes(tower.nodes.size() - 1)) tower.nodes.pop_back();
+  tower.node_masses.clear();
+  tower.line_masses.clear();
+  tower.allowances.clear();
+  tower.ice.clear();
+  tower.liquids.clear();
+}
+
+void read_masses(MapView& file, std::string_view key, const NameTable& nodes, const NameTable& groups,
+                 Tower& tower) {
+  const YamlNode* masses = file.find(key);
   if (masses == nullptr) return;
-  const auto* items = read_list(*masses, "masses", "masses", file.faults());
+  const auto* items = read_list(*masses, key, "masses", file.faults());
   if (items == nullptr) return;
   for (const YamlNode& item : *items) read_mass(item, nodes, groups, tower, file.faults());
 }

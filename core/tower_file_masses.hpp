@@ -6,7 +6,11 @@
 /// The keys `masses` and `mass_matrix` of a tower file. Private to the reader.
 namespace swaymark {
 
-void read_masses(MapView& file, const NameTable& nodes, const NameTable& groups, Tower& tower);
+/// Leaves the tower with the bars' own mass alone.
+void drop_masses(Tower& tower);
+/// Adds the masses listed under `key` to the tower's.
+void read_masses(MapView& file, std::string_view key, const NameTable& nodes, const NameTable& groups,
+                 Tower& tower);
 void read_mass_matrix(MapView& file, Tower& tower);
 
 }  // namespace swaymark

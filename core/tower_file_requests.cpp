@@ -232,7 +232,7 @@ void read_spectra(MapView& file, const FileSource& source, Tower& tower, NameTab
                  });
 }
 
-void read_seismic(MapView& file, Tower& tower, const NameTable& spectra) {
+void read_seismic(MapView& file, Tower& tower, const NameTable& spectra, bool damped) {
   const YamlNode* node = file.find("seismic");
   if (node == nullptr) return;
   MapView view(*node, "'seismic'", file.faults());
@@ -258,7 +258,7 @@ void read_seismic(MapView& file, Tower& tower, const NameTable& spectra) {
   view.refuse_later("minor_ratio", "the worst angle of excitation is");
   view.refuse_later("azimuth", "turned axes of excitation are");
   view.refuse_unknown();
-  if (!file.has("damping")) file.faults().add(node->place, wording::seismic_needs_damping());
+  if (!damped) file.faults().add(node->place, wording::seismic_needs_damping());
   tower.seismic = seismic;
 }
 

@@ -10,6 +10,7 @@ namespace swaymark {
 void read_modes(MapView& file, Tower& tower);
 void read_bands(MapView& file, Tower& tower);
 void read_spectra(MapView& file, const FileSource& source, Tower& tower, NameTable& names);
-void read_seismic(MapView& file, Tower& tower, const NameTable& spectra);
+/// \param damped  whether a damping is stated, which the analysis needs.
+void read_seismic(MapView& file, Tower& tower, const NameTable& spectra, bool damped);
 
 }  // namespace swaymark

@@ -227,6 +227,13 @@ void MapView::refuse_later(std::string_view key, std::string_view what) {
   }
 }
 
+void MapView::refuse(std::string_view key, Message message) {
+  const YamlNode* found = entry(key);
+  if (found == nullptr) return;
+  known_.emplace_back(key);
+  faults_.add(found->place, std::move(message));
+}
+
 void MapView::refuse_unknown() {
   if (!is_map_) return;
   for (std::size_t i = 0; i + 1 < node_.items.size(); i += 2) {

@@ -90,6 +90,10 @@ class MapView {
   [[nodiscard]] bool has(std::string_view key) const;
   /// Keys of the format that this version does not read; `what` ends in "is" or "are".
   void refuse_later(std::string_view key, std::string_view what);
+  /// Adds the fault at the key if it stands in the map; elsewhere it is none of the known ones.
+  void refuse(std::string_view key, Message message);
+  /// The keys asked for so far.
+  [[nodiscard]] const std::vector<std::string>& known() const { return known_; }
   void refuse_unknown();
 
   [[nodiscard]] std::optional<double> value(std::string_view key, Quantity quantity, Range range);

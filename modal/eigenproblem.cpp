@@ -3,6 +3,7 @@
 #include <algorithm>
 #include <cmath>
 #include <numeric>
+#include <utility>
 #include <vector>
 
 #include "modal/shift_invert.hpp"
@@ -59,9 +60,13 @@ double just_above(const Eigen::VectorXd& omega, Index end) {
 }  // namespace
 
 Eigenproblem::Eigenproblem(const SparseMatrix& stiffness, const SparseMatrix& mass)
+    : Eigenproblem(stiffness, mass, std::make_shared<const Factorisation>(stiffness)) {}
+
+Eigenproblem::Eigenproblem(const SparseMatrix& stiffness, const SparseMatrix& mass,
+                           std::shared_ptr<const Factorisation> factor)
     : stiffness_(stiffness),
       mass_(mass),
-      factor_(stiffness),
+      factor_(std::move(factor)),
       mode_count_((Eigen::VectorXd(mass.diagonal()).array() > 0.0).count()) {}
 
 Index Eigenproblem::most_modes() const {
@@ -77,8 +82,8 @@ ReciprocalPairs Eigenproblem::pairs(Index count, EigenMethod method) const {
   const Index n = mass_.rows();
   const bool dense = method == EigenMethod::dense || n <= kSmall || 3 * count > n;
   if (dense && (method != EigenMethod::shift_invert || 2 * count + 1 >= n))
-    return solve_dense(factor_, mass_, count);
-  ReciprocalPairs found = solve_shift_invert(factor_, mass_, count, Eigen::MatrixXd(n, 0));
+    return solve_dense(*factor_, mass_, count);
+  ReciprocalPairs found = solve_shift_invert(*factor_, mass_, count, Eigen::MatrixXd(n, 0));
   return sorted(found);
 }
 
@@ -89,7 +94,7 @@ Modes Eigenproblem::shapes_of(const ReciprocalPairs& pairs) const {
   modes.residual.resize(count);
   modes.shapes.resize(mass_.rows(), count);
   for (Index j = 0; j < count; ++j) {
-    Eigen::VectorXd shape = factor_.backward(pairs.v.col(j));
+    Eigen::VectorXd shape = factor_->backward(pairs.v.col(j));
     // Rayleigh quotient of A: no differences of large numbers, unlike phiT K phi.
     const double mu = shape.dot(mass_ * shape) / pairs.v.col(j).squaredNorm();
     const double omega_squared = 1.0 / mu;
@@ -108,7 +113,7 @@ Modes Eigenproblem::shapes_of(const ReciprocalPairs& pairs) const {
 Modes Eigenproblem::lowest(Index count, EigenMethod method) const {
   Modes none;
   none.status = ModesStatus::not_positive_definite;
-  if (!factor_.usable()) return none;
+  if (!factor_->usable()) return none;
   const Index wanted = std::min(count, most_modes());
   ReciprocalPairs found = pairs(std::min(wanted + 4, most_modes()), method);
   for (int round = 0; round < kMostContinuations; ++round) {
@@ -121,7 +126,7 @@ Modes Eigenproblem::lowest(Index count, EigenMethod method) const {
     if (counted < end || modes.count() >= mode_count_) break;
     const Index missing = counted - end + 1;
     const Index room = std::max<Index>(1, std::min(missing, (mass_.rows() - modes.count()) / 2 - 1));
-    found = joined(found, solve_shift_invert(factor_, mass_, room, found.v));
+    found = joined(found, solve_shift_invert(*factor_, mass_, room, found.v));
   }
   none = shapes_of(found);
   none.status = found.converged ? ModesStatus::incomplete : ModesStatus::not_converged;

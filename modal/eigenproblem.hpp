@@ -1,5 +1,6 @@
 #pragma once
 
+#include <memory>
 #include <optional>
 
 #include "modal/dense.hpp"
@@ -50,8 +51,11 @@ class Eigenproblem {
   /// \param stiffness K [N/m], \param mass M [kg]; both n_free x n_free, n_free >= 1. They must outlive the
   /// object.
   Eigenproblem(const SparseMatrix& stiffness, const SparseMatrix& mass);
+  /// The same with a factorisation of that very K made before.
+  Eigenproblem(const SparseMatrix& stiffness, const SparseMatrix& mass,
+               std::shared_ptr<const Factorisation> factor);
 
-  [[nodiscard]] const Factorisation& factor() const { return factor_; }
+  [[nodiscard]] const Factorisation& factor() const { return *factor_; }
   /// The number of modes there are: degrees of freedom with mass.
   [[nodiscard]] Index mode_count() const { return mode_count_; }
   /// The most modes that lowest() can give: all of a model of a few thousand unknowns, a third of a larger
@@ -76,7 +80,7 @@ class Eigenproblem {
 
   const SparseMatrix& stiffness_;
   const SparseMatrix& mass_;
-  Factorisation factor_;
+  std::shared_ptr<const Factorisation> factor_;
   Index mode_count_;
 };
 
