@@ -80,8 +80,8 @@ Parsed parse_new(const std::vector<std::string>& arguments) {
   if (const auto starter = starter_of(kind)) return {std::nullopt, std::string(starter->text), "", kAllMet};
   if (kind.starts_with('-')) return usage_error(fmt::format("'new' has no option '{}'", excerpt(kind)));
   const auto close = nearest(kind, kinds);
-  return usage_error(fmt::format("unknown kind of tower '{}'{}; {}", excerpt(kind),
-                                 close ? fmt::format(", did you mean '{}'?", *close) : "", known));
+  return usage_error(fmt::format("unknown kind of tower '{}'{}", excerpt(kind),
+                                 close ? fmt::format(", did you mean '{}'?", *close) : "; " + known));
 }
 
 std::optional<Parsed> known_later(const std::string& command) {

@@ -32,7 +32,7 @@ Message section_not_in_group(std::string_view group, std::string_view section,
   for (std::size_t i = 0; i < used.size() && i < most; ++i) names.push_back(excerpt(used[i]));
   return {fmt::format("no bar of group '{}' has section '{}'", excerpt(group), excerpt(section)),
           names.empty() ? "remove it: the group has no bars"
-                        : fmt::format("its bars have {}", alternatives(names))};
+                        : fmt::format("name a section of its bars ({})", alternatives(names))};
 }
 
 }  // namespace swaymark::wording

@@ -7,6 +7,7 @@
 
 #include "apps/exit_status.hpp"
 #include "apps/provenance.hpp"
+#include "apps/starter.hpp"
 
 namespace swaymark::test {
 
@@ -121,8 +122,24 @@ TEST_CASE("an unknown command is named with the nearest known one") {
 
 TEST_CASE("what is not yet supported is said to be so") {
   CHECK_THAT(refusal({"compare", "t"}), Catch::Contains("'compare' is not yet supported"));
-  CHECK_THAT(refusal({"new", "mast"}), Catch::Contains("'new' is not yet supported"));
   CHECK_THAT(refusal({"check", "t", "--html", "r.html"}), Catch::Contains("'--html' is not yet supported"));
+}
+
+TEST_CASE("a new tower file is text to print") {
+  const Parsed result = parsed({"new", "tank-stand"});
+  CHECK(result.status == kAllMet);
+  CHECK(!result.command);
+  CHECK(result.output == std::string(starter_of("tank-stand")->text));
+}
+
+TEST_CASE("a new tower file wants one kind that is known") {
+  for (const char* kind :
+       {"telecom-tower", "wind-turbine-tower", "tank-stand", "plane-truss", "nodes-and-bars"})
+    CHECK_THAT(refusal({"new"}), Catch::Contains(kind));
+  CHECK_THAT(refusal({"new", "telecom-towr"}), Catch::Contains("did you mean 'telecom-tower'?"));
+  CHECK_THAT(refusal({"new", "submarine"}), Catch::Contains("the kinds are telecom-tower"));
+  CHECK_THAT(refusal({"new", "tank-stand", "plane-truss"}), Catch::Contains("one kind"));
+  CHECK_THAT(refusal({"new", "--json"}), Catch::Contains("no option '--json'"));
 }
 
 TEST_CASE("shapes without a file to hold them and a folder that is none are refused") {
@@ -133,7 +150,7 @@ TEST_CASE("shapes without a file to hold them and a folder that is none are refu
 TEST_CASE("help comes in every common form and names every command option and status") {
   const std::string text = parsed({"--help"}).output;
   for (const char* word : {"check", "modes", "--json", "--csv", "--shapes", "--color", "--no-color",
-                           "--version", "NO_COLOR", "standard input", "70"}) {
+                           "--version", "NO_COLOR", "standard input", "70", "new KIND", "plane-truss"}) {
     CHECK_THAT(text, Catch::Contains(word));
   }
   for (const std::vector<std::string>& words : {std::vector<std::string>{},

@@ -5,7 +5,7 @@
 #include <catch2/catch.hpp>
 
 #include "apps/report_parts.hpp"
-#include "tests/apps/cases.hpp"
+#include "tests/apps/cases_scenarios.hpp"
 
 namespace swaymark::test {
 
@@ -165,6 +165,25 @@ TEST_CASE("a rod has empty cells where gravity does not apply and no column for 
   CHECK(rows[0] == Row{"node", "gravity x [N]", "seismic x [N]", "uplift [N]"});
   CHECK(rows[1][1].empty());
   CHECK(rows[1][3].empty());
+}
+
+TEST_CASE("scenarios are compared in two sheets beside those of the tower as stated") {
+  const Study study = lone_mass_study(kHeavySlackAndLoose);
+  const auto sheets = csv_report(study, false);
+  REQUIRE(sheets.size() == csv_report(study.stated, false).size() + 2);
+  const auto figures = rows_of(sheets[sheets.size() - 2].text);
+  CHECK(sheets[sheets.size() - 2].name == "scenarios.csv");
+  CHECK(figures.front() == Row{"scenario", "figure", "value", "change"});
+  const auto frequency = std::find_if(figures.begin(), figures.end(), [](const Row& row) {
+    return row[0] == "heavy" && row[1] == "mode 1 [Hz]";
+  });
+  REQUIRE(frequency != figures.end());
+  CHECK(std::stod((*frequency)[2]) == study.scenarios[0].analysis->frequency(0));
+  CHECK_THAT(std::stod((*frequency)[3]), is_near(-0.5, kSolved));
+  CHECK(figures.back() == Row{"loose", "not computed", "", ""});
+  const auto checks = rows_of(sheets.back().text);
+  CHECK(sheets.back().name == "scenario_checks.csv");
+  CHECK(std::find(checks.begin(), checks.end(), Row{"heavy", "band fan", "inside"}) != checks.end());
 }
 
 TEST_CASE("modes without damping have an empty cell for it") {

@@ -8,7 +8,7 @@
 #include <nlohmann/json.hpp>
 
 #include "apps/report_parts.hpp"
-#include "tests/apps/cases.hpp"
+#include "tests/apps/cases_scenarios.hpp"
 
 namespace swaymark::test {
 
@@ -272,6 +272,26 @@ TEST_CASE("a mechanism is written with its motion and cures in place of modes") 
   const double x = mechanism["motion"]["c"]["x"].get<double>();
   CHECK_THAT(x + mechanism["motion"]["c"]["z"].get<double>(), is_near(0.0, 0.0, kSolved));
   CHECK(std::abs(x) > 0.5);
+}
+
+TEST_CASE("every scenario has its label and its whole result") {
+  const Study study = lone_mass_study(
+      "[{label: heavy, masses: [{nodes: [c], mass: 600000 kg}]}, {label: loose, supports: [{nodes: [a], "
+      "fixed: [x, "
+      "z]}]}, {label: held, supports: [{nodes: [a, b, c], fixed: [x, z]}]}]");
+  const auto root = nlohmann::json::parse(json_report(study, false));
+  REQUIRE(root["scenarios"].size() == 3);
+  const auto& heavy = root["scenarios"][0];
+  CHECK(heavy["label"] == "heavy");
+  for (const char* key :
+       {"model", "mass", "mass_matrix", "modes", "completeness", "bands", "seismic", "verdicts", "notes"}) {
+    INFO(key);
+    CHECK(heavy.contains(key));
+  }
+  CHECK(heavy["modes"][0]["frequency"] == study.scenarios[0].analysis->frequency(0));
+  CHECK(root["scenarios"][1].contains("mechanisms"));
+  CHECK(root["scenarios"][2]["failure"] == study.scenarios[2].failure);
+  CHECK_FALSE(nlohmann::json::parse(json_report(study.stated, false)).contains("scenarios"));
 }
 
 TEST_CASE("there is no number that is none and none that does not read back the same") {

@@ -137,7 +137,7 @@ TEST_CASE("all faults of a file come in one run and in its order") {
                              "6:31 there is no section 'baar'", "6:69 bar g-2 joins node 'b' to itself",
                              "7:24 there is no node 'q'", "7:39 'y' is no axis of this tower",
                              "8:10 'damping' is a fraction, and '2' is 200 %",
-                             "9:1 'scenarios': scenarios are not yet supported",
+                             "9:12 'scenarios' lists nothing",
                              "10:1 unknown key 'colour' in a tower file"});
 }
 

@@ -75,6 +75,18 @@ TEST_CASE("more modes than there are gives all there are") {
   CHECK(problem.most_modes() == 6);
 }
 
+TEST_CASE("a factorisation made before gives the same modes to the last bit") {
+  std::mt19937 random(5);
+  const Model model = model_of(random_truss(3, 10, random));
+  const auto factor = std::make_shared<const Factorisation>(model.stiffness());
+  const Eigenproblem shared(model.stiffness(), model.mass(), factor);
+  CHECK(&shared.factor() == factor.get());
+  const Modes first = model.problem().lowest(5);
+  const Modes second = shared.lowest(5);
+  CHECK(first.omega == second.omega);
+  CHECK(first.shapes == second.shapes);
+}
+
 TEST_CASE("one free degree of freedom has the frequency of its spring and mass") {
   Tower tower = rod(1, 2.0, MassScheme::lumped);
   const Model model = model_of(tower);
