@@ -9,10 +9,11 @@ namespace swaymark::test {
 namespace {
 
 // The fenced block after `<!-- output of: COMMAND -->` in a text; empty where there is none.
-std::string block_after(const std::string& text, const std::string& command) {
+std::string block_after(const std::string& text, const std::string& command,
+                        const std::string& what = "output of: ") {
   std::istringstream lines(text);
   std::string line;
-  const std::string mark = "<!-- output of: " + command + " -->";
+  const std::string mark = "<!-- " + what + command + " -->";
   while (std::getline(lines, line) && line != mark) {
   }
   if (!std::getline(lines, line) || !line.starts_with("```")) return {};
@@ -44,6 +45,19 @@ TEST_CASE("readme output matches a real run") {
   // The first line that differs is told; those after it may only be shifted.
   for (std::size_t i = 0; i < std::min(actual.size(), expected.size()); ++i)
     REQUIRE(actual[i] == expected[i]);
+}
+
+TEST_CASE("the scenarios shown in the readme are those of a real run") {
+  const std::string command = "check data/northfell_common.yaml";
+  const std::string shown = block_after(bytes_of(source_folder() / "README.md"), "swaymark " + command,
+                                        "scenarios in the output of: ");
+  REQUIRE(shown.size() > 500);
+  const std::string output = swaymark(command).output;
+  const std::size_t begin = output.find("\nSCENARIOS\n");
+  const std::size_t end = output.find("\nLIMITS OF THE METHOD\n");
+  REQUIRE(begin != std::string::npos);
+  REQUIRE(end != std::string::npos);
+  CHECK(output.substr(begin + 1, end - begin - 1) == shown);
 }
 
 TEST_CASE("a block of output is found by its mark and ends with its fence") {
