@@ -176,9 +176,7 @@ std::string warnings(const Study& study) {
 std::string scenario_section(const Study& study) {
   std::string out = section_head("SCENARIOS");
   out += stated_keys(study) + "\n" + side_by_side("", figures(study), study);
-  out += wrapped(
-      "change: against the tower as stated, by the number of the mode; -: not among what was computed", "  ",
-      kTextWidth);
+  out += "  change: against the tower as stated; -: not among what was computed\n";
   if (study.stated.scope == Scope::check) {
     out += "\n" + side_by_side("check", outcomes(study), study);
     out += unmet_checks(study);
