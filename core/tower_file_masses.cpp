@@ -169,6 +169,10 @@ void read_mass(const YamlNode& item, const NameTable& node_names, const NameTabl
 
 }  // namespace
 
+void check_ice(const Tower& tower, FaultList& faults) {
+  for (const IceMass& ice : tower.ice) check_iced_bars(ice, tower, faults);
+}
+
 void drop_masses(Tower& tower) {
   // What sloshes stands behind all nodes of the tower's own.
   while (!tower.nodes.empty() && tower.sloshes(tower.nodes.size() - 1)) tower.nodes.pop_back();

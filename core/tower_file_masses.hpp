@@ -8,6 +8,8 @@ namespace swaymark {
 
 /// Leaves the tower with the bars' own mass alone.
 void drop_masses(Tower& tower);
+/// Adds a fault for ice whose bars are not there or have no outline, once their sections were exchanged.
+void check_ice(const Tower& tower, FaultList& faults);
 /// Adds the masses listed under `key` to the tower's.
 void read_masses(MapView& file, std::string_view key, const NameTable& nodes, const NameTable& groups,
                  Tower& tower);

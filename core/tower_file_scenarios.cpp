@@ -40,12 +40,12 @@ class ScenarioReader {
     Scenario scenario{read_label(view), stated_keys(item), stated_, item.place};
     Tower& tower = scenario.tower;
     tower.base_study.reset();  // of the tower as stated alone
+    read_group_sections(view, tower);
     read_masses_of(view, tower);
     if (view.has("supports")) {
       tower.supports.clear();
       read_supports(view, names_.parts.nodes, tower);
     }
-    read_group_sections(view, tower);
     read_factor(view, "area_factor", &Group::area_factor, tower);
     read_factor(view, "stiffness_factor", &Group::stiffness_factor, tower);
     read_mass_matrix(view, tower);
@@ -85,6 +85,7 @@ class ScenarioReader {
     if (view.has("masses") && view.has("more_masses"))
       faults_.add(view.place(), wording::keys_exclude("masses", "more_masses", view.owner()));
     if (view.has("masses")) drop_masses(tower);
+    if (view.has("group_sections")) check_ice(tower, faults_);
     if (!is_none(view.find("masses"))) read_masses(view, "masses", names_.parts.nodes, names_.groups, tower);
     read_masses(view, "more_masses", names_.parts.nodes, names_.groups, tower);
   }
