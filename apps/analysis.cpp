@@ -9,6 +9,7 @@
 #include "apps/notes.hpp"
 #include "apps/segment_notes.hpp"
 #include "apps/shared_work.hpp"
+#include "apps/stabilisation.hpp"
 #include "modal/damping.hpp"
 #include "modal/mode_character.hpp"
 #include "modal/participation.hpp"
@@ -197,6 +198,8 @@ Analysis analysis_of(Tower tower, Provenance provenance, Scope scope, SharedWork
   require_finite(analysis);
   analysis.verdicts = verdicts_of(analysis);
   analysis.notes = notes_of(analysis);
+  if (!analysis.tower.stabilisers.empty())
+    analysis.notes.push_back(stabilisation_note(study_stabilisation(analysis, problem)));
   return analysis;
 }
 

@@ -72,6 +72,29 @@ void about_lengths(const Analysis& analysis, double height, Notes& notes) {
                               longest->length, height));
 }
 
+// The model is regular, but its lowest modes rest on what may be a slip of the pen.
+void about_soft_bars(const Analysis& analysis, Notes& notes) {
+  constexpr double soft = 1e-4;  // of the middle bar; sections of one tower lie within a hundred
+  const auto& bars = analysis.assembly.bars;
+  if (bars.size() < 2) return;
+  std::vector<double> stiffness;
+  for (const BarElement& bar : bars) stiffness.push_back(bar.axial_stiffness);
+  const auto middle = stiffness.begin() + static_cast<std::ptrdiff_t>(stiffness.size() / 2);
+  std::nth_element(stiffness.begin(), middle, stiffness.end());
+  const auto softest = std::min_element(
+      bars.begin(), bars.end(),
+      [](const BarElement& a, const BarElement& b) { return a.axial_stiffness < b.axial_stiffness; });
+  if (softest->axial_stiffness >= soft * *middle) return;
+  const auto count = std::count_if(
+      bars.begin(), bars.end(), [&](const BarElement& bar) { return bar.axial_stiffness < soft * *middle; });
+  notes.push_back(
+      fmt::format("Plausible? Bar {} is {:.2g} times softer than most{}: the tower stands, but nearly as if "
+                  "it were not there.",
+                  analysis.tower.bar_name(static_cast<std::size_t>(softest - bars.begin())),
+                  *middle / softest->axial_stiffness,
+                  count > 1 ? fmt::format(", and {} more are alike", count - 1) : ""));
+}
+
 void about_masses(const Analysis& analysis, double height, Notes& notes) {
   const MassLedger& ledger = analysis.ledger;
   for (const LedgerEntry& entry : ledger.entries) {
@@ -155,6 +178,7 @@ std::vector<std::string> plausibility_notes(const Analysis& analysis) {
   about_densities(analysis.tower, notes);
   about_units(analysis.tower, notes);
   about_lengths(analysis, height, notes);
+  about_soft_bars(analysis, notes);
   about_masses(analysis, height, notes);
   about_ice(analysis.tower, notes);
   about_liquids(analysis.tower, notes);

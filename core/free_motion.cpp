@@ -9,6 +9,8 @@
 #include <Eigen/Eigenvalues>
 #include <Eigen/SparseCholesky>
 
+#include "core/open_direction.hpp"
+
 namespace swaymark {
 
 namespace {
@@ -35,7 +37,7 @@ constexpr Index kMostDense = 600;      // suspects that stand for no free motion
 class Search {
  public:
   Search(const Tower& tower, const Assembly& assembly)
-      : tower_(tower), dofs_(assembly.dofs), links_(assembly.links) {
+      : tower_(tower), dofs_(assembly.dofs), links_(assembly.links), stabilisers_(assembly.stabilisers) {
     add_elongations(assembly);
     held_.resize(static_cast<std::size_t>(dofs_.dof_count()), false);
     for (std::size_t dof = 0; dof < held_.size(); ++dof) {
@@ -89,43 +91,25 @@ class Search {
   }
 
   void look_at_nodes() {
-    std::vector<Eigen::Matrix3d> stiffness(tower_.nodes.size(), Eigen::Matrix3d::Zero());
-    for (const Bar& bar : tower_.bars) {
-      const Eigen::Vector3d along =
-          (tower_.nodes[bar.to].position - tower_.nodes[bar.from].position).normalized();
-      stiffness[bar.from] += along * along.transpose();
-      stiffness[bar.to] += along * along.transpose();
-    }
+    std::vector<bool> loose(tower_.nodes.size(), true);
+    for (const Bar& bar : tower_.bars) loose[bar.from] = loose[bar.to] = false;
+    open_ = open_directions(tower_);
+    // A node with a tank on it takes the liquid along, and is looked at as part of a body or of the whole.
     for (const Link& link : links_) {
-      const Index axis = index_of(dofs_.axis_of(link.dof));
-      stiffness[dofs_.node_of(link.dof)](axis, axis) += 1.0;
+      for (const Index other : link.others) open_[dofs_.node_of(other)].clear();
     }
-    open_.resize(tower_.nodes.size());
-    for (std::size_t node = 0; node < tower_.nodes.size(); ++node) look_at_node(node, stiffness[node]);
-  }
-
-  void look_at_node(std::size_t node, Eigen::Matrix3d stiffness) {
-    const double largest = std::max(1.0, stiffness.trace());
-    const bool loose = stiffness.isZero(0.0);
-    std::array<bool, 3> free{};
-    for (std::size_t k = 0; k < dofs_.axes().size(); ++k) {
-      free[static_cast<std::size_t>(dofs_.axes()[k])] = !held_[static_cast<std::size_t>(dofs_.dof(node, k))];
+    for (const DirectedSpring& spring : stabilisers_) {
+      hold(spring.node, spring.direction);
+      open_[spring.node].clear();
     }
-    for (Index axis = 0; axis < 3; ++axis) {
-      if (free[static_cast<std::size_t>(axis)]) continue;
-      stiffness.row(axis).setZero();
-      stiffness.col(axis).setZero();
-      stiffness(axis, axis) = 2.0 * largest;
-    }
-    const Eigen::SelfAdjointEigenSolver<Eigen::Matrix3d> solver(stiffness);
-    for (Index k = 0; k < 3 && solver.eigenvalues()(k) <= kOpen * largest; ++k) {
-      const Eigen::Vector3d direction = solver.eigenvectors().col(k);
-      open_[node].push_back(direction);
-      hold(node, direction);
-      Index leading = 0;
-      direction.cwiseAbs().maxCoeff(&leading);
-      found_.list.push_back(
-          {loose ? MotionClass::loose_node : MotionClass::node, {{node, direction / direction[leading]}}});
+    for (std::size_t node = 0; node < tower_.nodes.size(); ++node) {
+      for (const Eigen::Vector3d& direction : open_[node]) {
+        hold(node, direction);
+        Index leading = 0;
+        direction.cwiseAbs().maxCoeff(&leading);
+        found_.list.push_back({loose[node] ? MotionClass::loose_node : MotionClass::node,
+                               {{node, direction / direction[leading]}}});
+      }
     }
   }
 
@@ -191,6 +175,11 @@ class Search {
       }
       const Eigen::Matrix<double, 3, 6> rest = without_open(node, motion);
       moves += rest.transpose() * rest;
+    }
+    for (const DirectedSpring& spring : stabilisers_) {
+      if (!std::binary_search(nodes.begin(), nodes.end(), spring.node)) continue;
+      const Eigen::Matrix<double, 1, 6> along = spring.direction.transpose() * motion_at(spring.node);
+      opposed += along.transpose() * along;
     }
     const Eigen::SelfAdjointEigenSolver<Matrix6d> solver(opposed);
     Index ways = 0;
@@ -377,6 +366,7 @@ class Search {
   const Tower& tower_;
   const DofMap& dofs_;
   const std::vector<Link>& links_;
+  const std::vector<DirectedSpring>& stabilisers_;
   Triplets elongation_;
   Index rows_ = 0;
   std::vector<bool> held_;                          // n_dof: fixed or on a spring

@@ -141,6 +141,10 @@ class Report {
           group.count() > static_cast<std::size_t>(distinct) ? ", in two directions" : "", names(nodes));
     }
     add_cures(group);
+    group.cures.push_back(
+        fmt::format("or, where {} no load, 'supports: [{{nodes: [{}], stabilise: 1 MN/m}}]'",
+                    group.count() == 1 ? "it carries" : "they carry",
+                    group.count() == 1 ? name(first.parts.front().node) : "..."));
   }
 
   void describe_body(Mechanism& group) const {

@@ -80,6 +80,13 @@ struct Support {
   std::optional<Pad> pad = {};  ///< that the springs were computed from
 };
 
+/// A spring to the ground against the directions in which a node is free with its neighbours held.
+struct Stabiliser {
+  std::size_t node = 0;
+  double stiffness = 0.0;  ///< [N/m] > 0
+  Place place;
+};
+
 /// A carried mass shared equally by nodes (a discrete ancillary).
 struct NodeMass {
   std::vector<std::size_t> nodes;
@@ -174,7 +181,8 @@ struct Tower {
   std::vector<Node> nodes;
   std::vector<Group> groups;
   std::vector<Bar> bars;
-  std::vector<Support> supports;  ///< at most one per node
+  std::vector<Support> supports;        ///< at most one per node
+  std::vector<Stabiliser> stabilisers;  ///< at most one per node
   std::vector<NodeMass> node_masses;
   std::vector<LineMass> line_masses;
   std::vector<Allowance> allowances;

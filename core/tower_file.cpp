@@ -52,7 +52,6 @@ void read_stiffening(MapView& file) {
 }
 
 void refuse_later_keys(MapView& file) {
-  file.refuse_later("stabilise", "springs at loose nodes are");
   file.refuse_later("member_bending", "bending of members is");
   file.refuse_later("uncertainty", "intervals of frequency are");
 }

@@ -8,6 +8,7 @@
 #include "core/tower_file_masses.hpp"
 #include "core/tower_file_requests.hpp"
 #include "core/tower_file_supports.hpp"
+#include "core/validate.hpp"
 #include "core/wording_scenarios.hpp"
 
 namespace swaymark {
@@ -44,7 +45,9 @@ class ScenarioReader {
     read_masses_of(view, tower);
     if (view.has("supports")) {
       tower.supports.clear();
+      tower.stabilisers.clear();
       read_supports(view, names_.parts.nodes, tower);
+      check_stabilisers(tower, faults_);
     }
     read_factor(view, "area_factor", &Group::area_factor, tower);
     read_factor(view, "stiffness_factor", &Group::stiffness_factor, tower);

@@ -29,9 +29,9 @@ class SupportReader {
     const YamlNode* fixed = view.find("fixed");
     const YamlNode* springs = view.find("springs");
     const YamlNode* pad = view.find("pad");
-    if (!view.has("fixed") && !view.has("springs") && !view.has("pad")) {
-      faults_.add(item.place, wording::holds_nothing());
-    }
+    const auto stabilise = view.value("stabilise", Quantity::stiffness, Range::positive);
+    const bool holds = view.has("fixed") || view.has("springs") || view.has("pad");
+    if (!holds && !view.has("stabilise")) faults_.add(item.place, wording::holds_nothing());
     if (fixed != nullptr) read_fixed(*fixed, support);
     if (springs != nullptr) read_springs(*springs, support);
     for (const char* beside : {"fixed", "springs"}) {
@@ -42,7 +42,8 @@ class SupportReader {
     if (nodes == nullptr) return;
     for (const std::size_t node : read_node_list(*nodes, nodes_, faults_)) {
       support.node = node;
-      hold(support);
+      if (holds) hold(support);
+      if (stabilise) stabilised(node, *stabilise, item.place);
     }
   }
 
@@ -68,6 +69,15 @@ class SupportReader {
       if (stiffness) support.spring[static_cast<std::size_t>(axis)] = *stiffness;
     }
     view.refuse_unknown();
+  }
+
+  void stabilised(std::size_t node, double stiffness, Place place) {
+    const auto [first, fresh] = stabilised_.emplace(node, place);
+    if (fresh) {
+      tower_.stabilisers.push_back({node, stiffness, place});
+    } else {
+      faults_.add(place, wording::stabilised_twice(tower_.nodes[node].name, first->second));
+    }
   }
 
   void read_pad(const YamlNode& map, Support& support) {
@@ -133,6 +143,7 @@ class SupportReader {
   const NameTable& nodes_;
   Tower& tower_;
   FaultList& faults_;
+  std::map<std::size_t, Place> stabilised_;
   std::map<std::size_t, std::size_t> held_;  // node to its place in the tower's supports
 };
 

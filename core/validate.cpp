@@ -4,9 +4,11 @@
 #include <unordered_map>
 #include <utility>
 
+#include "core/open_direction.hpp"
 #include "core/point_grid.hpp"
 #include "core/text.hpp"
 #include "core/wording.hpp"
+#include "core/wording_bases.hpp"
 
 namespace swaymark {
 
@@ -68,6 +70,17 @@ void find_faulty_bars(const Tower& tower, FaultList& faults) {
 void validate(const Tower& tower, FaultList& faults) {
   find_coincident_nodes(tower, faults);
   find_faulty_bars(tower, faults);
+  check_stabilisers(tower, faults);
+}
+
+void check_stabilisers(const Tower& tower, FaultList& faults) {
+  // Bars that could not be read may be what holds a node, or what leaves it free.
+  if (tower.stabilisers.empty() || !faults.empty()) return;
+  const auto open = open_directions(tower);
+  for (const Stabiliser& stabiliser : tower.stabilisers) {
+    if (open[stabiliser.node].empty())
+      faults.add(stabiliser.place, wording::nothing_to_stabilise(excerpt(tower.nodes[stabiliser.node].name)));
+  }
 }
 
 }  // namespace swaymark

@@ -12,4 +12,8 @@ namespace swaymark {
 /// mechanism.hpp.
 void validate(const Tower& tower, FaultList& faults);
 
+/// The part of it that depends on the supports: adds a fault for every node that `stabilise` names and that
+/// is not free in a direction of its own. Says nothing where other faults are known.
+void check_stabilisers(const Tower& tower, FaultList& faults);
+
 }  // namespace swaymark

@@ -221,7 +221,7 @@ Message held_twice(std::string_view node, std::string_view axis, Place first) {
           "an axis is fixed, or on one spring, or free"};
 }
 Message holds_nothing() {
-  return {"a support needs 'fixed', 'springs' or 'pad'", "write for example 'fixed: [x, y, z]'"};
+  return {"a support needs 'fixed', 'springs', 'pad' or 'stabilise'", "write for example 'fixed: [x, y, z]'"};
 }
 Message tube_wall(double diameter, double wall) {
   return {fmt::format("a tube of {:.6g} m outside diameter has no wall of {:.6g} m", diameter, wall),

@@ -25,6 +25,16 @@ Message poisson_out_of_range(double value) {
   return {fmt::format("no soil has a Poisson's ratio of {:.4g} here: 0 <= nu < 0.5 is wanted", value),
           "common are 0.2 to 0.35 for sand and 0.4 to 0.49 for wet clay"};
 }
+Message stabilised_twice(std::string_view node, Place first) {
+  return {fmt::format("node '{}' is stabilised twice, first in line {}", node, first.line),
+          "remove it from one of the lists"};
+}
+Message nothing_to_stabilise(std::string_view node) {
+  return {
+      fmt::format("node '{}' is not free in a direction of its own, so that 'stabilise' has nothing to hold",
+                  node),
+      "remove it from the list; what moves several nodes together is held by a bar or a support"};
+}
 Message study_is_a_range(std::string_view came) {
   return {fmt::format("'base_study' wants two stiffnesses, got {}", came),
           "write for example [20 kN/mm, 1000 kN/mm]: the softest and the stiffest support"};

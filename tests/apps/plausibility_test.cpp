@@ -117,4 +117,21 @@ TEST_CASE("a rod is not asked about heights") {
   }
 }
 
+TEST_CASE("a bar a million times softer than the others is asked about and is no mechanism") {
+  const auto with_brace = [](const std::string& area) {
+    return checked(
+        "swaymark: 1\ndimensions: 2\nmaterials: {steel: {E: 210 GPa, density: 7850}}\n"
+        "sections: {post: {area: 10 cm2}, brace: {area: " +
+        area +
+        "}}\nnodes: {a: [0, 0], b: [2, 0], c: [0, 2], d: [2, 2]}\n"
+        "members: [{group: g, section: post, material: steel, bars: [[a, c], [b, d], [c, d]]}, "
+        "{group: h, section: brace, material: steel, bars: [[a, d]]}]\n"
+        "supports: [{nodes: [a, b], fixed: [x, z]}]\n");
+  };
+  const Analysis soft = with_brace("0.00001 cm2");
+  CHECK(!soft.mechanisms.any());
+  CHECK(asks(soft, "Bar h-1 is 1.4e+06 times softer"));
+  CHECK(!asks(with_brace("1 cm2"), "softer"));
+}
+
 }  // namespace swaymark::test

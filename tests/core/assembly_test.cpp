@@ -166,4 +166,24 @@ TEST_CASE("a stiffness or mass that is not finite stops the computation and name
   CHECK_THROWS_WITH(assemble(tower), Catch::Contains("bar bars-1 is not finite"));
 }
 
+TEST_CASE("a spring that stabilises acts along the open direction of its node alone") {
+  // Two bars in line along (1, 1): the spring acts along (1, -1).
+  Tower tower = bare_tower(2);
+  for (const double s : {0.0, 2.0, 1.0}) add_node(tower, {s, 0.0, s});
+  fix(tower, 0);
+  fix(tower, 1);
+  add_bar(tower, 0, 2);
+  add_bar(tower, 1, 2);
+  const Eigen::MatrixXd before(assemble(tower).stiffness);
+  tower.stabilisers.push_back({2, 6.0, {}});
+  const Assembly assembly = assemble(tower);
+  REQUIRE(assembly.stabilisers.size() == 1);
+  CHECK(assembly.stabilisers[0].node == 2);
+  Eigen::Matrix2d expected;
+  expected << 3.0, -3.0, -3.0, 3.0;
+  // The difference of two large matrices: rounding of the bars' stiffness.
+  CHECK((Eigen::MatrixXd(assembly.stiffness) - before - expected).cwiseAbs().maxCoeff() <=
+        kRoundoff * before.maxCoeff());
+}
+
 }  // namespace swaymark::test

@@ -278,4 +278,28 @@ TEST_CASE("thousands of motions are all found") {
   CHECK(motions_of(tower).list.size() == 9000);
 }
 
+TEST_CASE("a node that a spring stabilises is free no longer") {
+  Tower tower = flat_panel();
+  tower.stabilisers.push_back({4, 1.0, {}});
+  CHECK(motions_of(tower).list.empty());
+}
+
+TEST_CASE("a tank moves with a tower on too few supports") {
+  Tower tower = regular_mast({});
+  Liquid liquid;
+  const std::size_t count = tower.nodes.size();
+  liquid.nodes = {count - 2, count - 3};
+  liquid.radius = 1.0;
+  liquid.depth = 1.0;
+  liquid.density = 1000.0;
+  liquid.node = count;
+  tower.nodes.push_back(
+      {"water", 0.5 * (tower.nodes[count - 2].position + tower.nodes[count - 3].position), {}});
+  tower.liquids.push_back(liquid);
+  CHECK(motions_of(tower).list.empty());
+  for (Support& support : tower.supports) support.fixed = {false, false, true};
+  CHECK(count_of(tower, MotionClass::body) == 3);
+  CHECK(motions_of(tower).list.size() == 3);
+}
+
 }  // namespace swaymark::test

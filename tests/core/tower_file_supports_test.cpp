@@ -61,7 +61,7 @@ TEST_CASE("an axis the tower does not have cannot be held") {
 
 TEST_CASE("a support must hold something somewhere") {
   CHECK(refusals_with("supports: [{nodes: [a, b]}]") ==
-        Refusals{"7:12 a support needs 'fixed', 'springs' or 'pad'"});
+        Refusals{"7:12 a support needs 'fixed', 'springs', 'pad' or 'stabilise'"});
   CHECK(refusals_with("supports: [{fixed: [x]}]") == Refusals{"7:12 'nodes' is missing in a support"});
   CHECK(refusals_with("supports: [{nodes: [], fixed: [x]}]") == Refusals{"7:20 'nodes' lists nothing"});
   CHECK(refusals_with("supports: [{nodes: [a, b], fixed: []}]") == Refusals{"7:35 'fixed' lists nothing"});
@@ -112,6 +112,20 @@ TEST_CASE("a base study is a range of stiffness for supports that are fixed upri
   CHECK(refusals_with("base_study: [0, 5]") == Refusals{"8:14 'base_study' must be above zero, got '0'"});
   CHECK(refusals_with("base_study: [5, 5]") ==
         Refusals{"8:13 the range ends at 5 N/m, not above its begin at 5 N/m"});
+}
+
+TEST_CASE("springs that stabilise are read beside supports and once a node") {
+  const std::string straight = "nodes: {a: [0, 0], b: [2, 0], c: [1, 0]}";
+  const Tower tower = tower_of(
+      tower_with({straight, "supports: [{nodes: [a, b], fixed: [x, z]}, {nodes: [c], stabilise: 1 MN/m}]"}));
+  REQUIRE(tower.stabilisers.size() == 1);
+  CHECK(tower.stabilisers[0].node == 2);
+  CHECK(tower.stabilisers[0].stiffness == 1e6);
+  CHECK(tower.supports.size() == 2);
+  CHECK(refusals_of(tower_with(
+            {straight,
+             "supports: [{nodes: [a, b], fixed: [x, z]}, {nodes: [c], stabilise: 1}, {nodes: [c], "
+             "stabilise: 2}]"})) == Refusals{"7:72 node 'c' is stabilised twice, first in line 7"});
 }
 
 }  // namespace swaymark::test

@@ -20,4 +20,11 @@ TEST_CASE("every message on pads and base studies says what is wrong and what wo
   }
 }
 
+TEST_CASE("faults of springs that stabilise name the node and the way out") {
+  CHECK_THAT(wording::stabilised_twice("m1", {7, 3}).what,
+             Catch::Contains("'m1'") && Catch::Contains("line 7"));
+  CHECK_THAT(wording::nothing_to_stabilise("m1").what, Catch::Contains("'m1'"));
+  CHECK_THAT(wording::nothing_to_stabilise("m1").cure, Catch::Contains("bar"));
+}
+
 }  // namespace swaymark::test

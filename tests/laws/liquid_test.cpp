@@ -127,9 +127,11 @@ TEST_CASE("a tank holds no node that nothing else holds") {
   REQUIRE(analysis.mechanisms.any());
   bool named = false;
   for (const Mechanism& mechanism : analysis.mechanisms.mechanisms) {
-    for (const auto& motion : mechanism.motion) named = named || motion.node == node;
+    for (const FreeMotion& motion : mechanism.motions)
+      named = named || motion.of(node) != Eigen::Vector3d::Zero();
   }
   CHECK(named);
+  CHECK(analysis.mechanisms.count() == 3);  // what sloshes goes with the node and is no motion of its own
 }
 
 TEST_CASE("ice on every bar is a mass per length on every bar") {
