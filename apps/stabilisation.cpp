@@ -16,14 +16,17 @@ namespace {
 constexpr double kTurn = 2.0 * std::numbers::pi;
 constexpr std::size_t kFollowed = 3;
 constexpr double kWhole = 0.01;  // of the moving mass: a mode that moves the tower, and no loose node alone
-constexpr double kIndependent = 1e-3;  // a tenth of what a check of frequencies asks for
-constexpr double kReach = 1.5;         // of the highest followed frequency: modes are looked for up to there
-constexpr double kRepeated = 1e-4;     // relative distance of frequencies whose shapes are one subspace
+constexpr double kIndependent = 1e-3;   // a tenth of what a check of frequencies asks for
+constexpr double kAlike = 0.5;          // of a shape: below it no mode there is the one that is followed
+constexpr double kMostCarried = 0.005;  // of the weight: more is no loose node that carries nothing
+constexpr double kReach = 1.5;          // of the highest followed frequency: modes are looked for up to there
+constexpr double kRepeated = 1e-4;      // relative distance of frequencies whose shapes are one subspace
 
 std::vector<Index> followed_modes(const Analysis& analysis) {
   std::vector<Index> modes;
   for (Index j = 0; j < analysis.mode_count() && modes.size() < kFollowed; ++j) {
-    if (analysis.mass_ratio.row(j).maxCoeff() >= kWhole) modes.push_back(j);
+    const bool sloshes = analysis.character[static_cast<std::size_t>(j)] == "liquid";
+    if (!sloshes && analysis.mass_ratio.row(j).maxCoeff() >= kWhole) modes.push_back(j);
   }
   for (Index j = 0; j < analysis.mode_count() && modes.empty(); ++j) modes.push_back(j);
   return modes;
@@ -53,7 +56,10 @@ Modes modes_up_to(const Eigenproblem& problem, double frequency) {
 }
 
 std::string range_words(double from, double to) {
-  const auto words = [](double stiffness) { return fmt::format("{:.3g} kN/m", 1e-3 * stiffness); };
+  const auto words = [](double stiffness) {
+    return stiffness >= 1e6 ? fmt::format("{:.3g} MN/m", 1e-6 * stiffness)
+                            : fmt::format("{:.3g} kN/m", 1e-3 * stiffness);
+  };
   return from == to ? words(from) : fmt::format("{} to {}", words(from), words(to));
 }
 
@@ -65,7 +71,7 @@ double Stabilisation::Row::largest_change() const {
 
 bool Stabilisation::independent() const {
   return std::all_of(rows.begin(), rows.end(),
-                     [](const Row& row) { return row.largest_change() <= kIndependent; });
+                     [](const Row& row) { return row.found && row.largest_change() <= kIndependent; });
 }
 
 Stabilisation study_stabilisation(const Analysis& analysis, const Eigenproblem& problem) {
@@ -77,7 +83,7 @@ Stabilisation study_stabilisation(const Analysis& analysis, const Eigenproblem& 
   study.softest = softest->stiffness;
   study.stiffest = stiffest->stiffness;
   for (const Index mode : followed_modes(analysis))
-    study.rows.push_back({mode, {0.0, analysis.frequency(mode), 0.0}});
+    study.rows.push_back({mode, true, {0.0, analysis.frequency(mode), 0.0}});
   const double highest = analysis.frequency(study.rows.back().mode);
   for (const std::size_t end : {std::size_t{0}, std::size_t{2}}) {
     Tower tower = analysis.tower;
@@ -86,7 +92,8 @@ Stabilisation study_stabilisation(const Analysis& analysis, const Eigenproblem& 
     const Modes modes = modes_up_to(Eigenproblem(variant.stiffness, variant.mass), kReach * highest);
     for (auto& row : study.rows) {
       Index best = 0;
-      likeness(analysis, row.mode, modes.shapes).maxCoeff(&best);
+      const double like = likeness(analysis, row.mode, modes.shapes).maxCoeff(&best);
+      row.found = row.found && like >= kAlike;
       row.frequency[end] = modes.omega(best) / kTurn;
     }
   }
@@ -95,12 +102,10 @@ Stabilisation study_stabilisation(const Analysis& analysis, const Eigenproblem& 
     const Eigen::VectorXd sag =
         analysis.assembly.dofs.expand(problem.factor().solve(analysis.assembly.dofs.free_part(weight)));
     double carried = 0.0;
-    for (const DirectedSpring& spring : analysis.assembly.stabilisers) {
-      double move = 0.0;
-      for (std::size_t k = 0; k < analysis.assembly.dofs.axes().size(); ++k)
-        move += spring.direction[index_of(analysis.assembly.dofs.axes()[k])] *
-                sag(analysis.assembly.dofs.dof(spring.node, k));
-      carried += std::abs(spring.stiffness * move);
+    for (const NeighbourSpring& spring : analysis.assembly.stabilisers) {
+      double elongation = 0.0;
+      for (const auto& [dof, value] : spring.elongation) elongation += value * sag(dof);
+      carried += std::abs(spring.stiffness * elongation);
     }
     if (weight.cwiseAbs().sum() > 0.0) study.share_of_weight = carried / weight.cwiseAbs().sum();
   }
@@ -121,11 +126,11 @@ std::string stabilisation_note(const Stabilisation& study) {
   const std::string to =
       range_words(Stabilisation::kFactors[2] * study.softest, Stabilisation::kFactors[2] * study.stiffest);
   std::string note = fmt::format(
-      "{}{} stabilising spring{} of {} to the ground: over three decades of stiffness, {} to {}, the first "
+      "{}{} stabilising spring{} of {}: over three decades of stiffness, {} to {}, the first "
       "frequencies {} "
       "({}; largest change {:.2g} %)",
-      study.independent() ? "" : "WARNING: ", study.springs, study.springs == 1 ? "" : "s",
-      range_words(study.softest, study.stiffest), from, to,
+      study.independent() && study.share_of_weight <= kMostCarried ? "" : "WARNING: ", study.springs,
+      study.springs == 1 ? "" : "s", range_words(study.softest, study.stiffest), from, to,
       study.independent() ? "do not depend on them" : "DEPEND on them, so hold these nodes by bars", figures,
       100.0 * largest);
   if (study.share_of_weight > 0.0)

@@ -14,6 +14,7 @@ struct Stabilisation {
 
   struct Row {
     Index mode = 0;                               ///< from 0
+    bool found = true;                            ///< again with the softer and the stiffer springs
     std::array<double, 3> frequency{};            ///< by factor [Hz]
     [[nodiscard]] double largest_change() const;  ///< relative to the stiffness as stated
   };

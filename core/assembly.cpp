@@ -4,7 +4,7 @@
 
 #include <fmt/format.h>
 
-#include "core/open_direction.hpp"
+#include "core/neighbour_spring.hpp"
 
 namespace swaymark {
 
@@ -82,26 +82,9 @@ void add_link(const Link& link, Blocks& blocks) {
   }
 }
 
-// Each stabilised node gets a spring against every direction in which it is free with its neighbours held.
-std::vector<DirectedSpring> directed_springs(const Tower& tower) {
-  std::vector<DirectedSpring> springs;
-  if (tower.stabilisers.empty()) return springs;
-  const auto open = open_directions(tower);
-  for (const Stabiliser& stabiliser : tower.stabilisers) {
-    for (const Eigen::Vector3d& direction : open[stabiliser.node])
-      springs.push_back({stabiliser.node, direction, stabiliser.stiffness});
-  }
-  return springs;
-}
-
-void add_spring(const DirectedSpring& spring, const DofMap& dofs, Blocks& blocks) {
-  const auto& axes = dofs.axes();
-  for (std::size_t i = 0; i < axes.size(); ++i) {
-    for (std::size_t j = 0; j < axes.size(); ++j) {
-      const double value = spring.direction[index_of(axes[i])] * spring.direction[index_of(axes[j])];
-      if (value != 0.0)
-        blocks.add(dofs.dof(spring.node, i), dofs.dof(spring.node, j), spring.stiffness * value);
-    }
+void add_spring(const NeighbourSpring& spring, Blocks& blocks) {
+  for (const auto& [row, a] : spring.elongation) {
+    for (const auto& [column, b] : spring.elongation) blocks.add(row, column, spring.stiffness * a * b);
   }
 }
 
@@ -160,8 +143,8 @@ Assembly assemble(const Tower& tower) {
   for (const Liquid& liquid : tower.liquids) add_liquid(liquid, dofs, mass);
   result.links = liquid_links(tower, dofs);
   for (const Link& link : result.links) add_link(link, stiffness);
-  result.stabilisers = directed_springs(tower);
-  for (const DirectedSpring& spring : result.stabilisers) add_spring(spring, dofs, stiffness);
+  result.stabilisers = neighbour_springs(tower, dofs);
+  for (const NeighbourSpring& spring : result.stabilisers) add_spring(spring, stiffness);
   result.springs = Eigen::VectorXd::Zero(dofs.free_count());
   for (const Support& support : tower.supports) {
     for (std::size_t i = 0; i < dofs.axes().size(); ++i) {

@@ -6,16 +6,10 @@
 #include "core/dof_map.hpp"
 #include "core/liquid.hpp"
 #include "core/matrix.hpp"
+#include "core/neighbour_spring.hpp"
 #include "core/tower.hpp"
 
 namespace swaymark {
-
-/// A spring between a node and the ground in a direction of its own.
-struct DirectedSpring {
-  std::size_t node = 0;
-  Eigen::Vector3d direction = Eigen::Vector3d::Zero();  ///< unit vector, zero along held axes
-  double stiffness = 0.0;                               ///< [N/m]
-};
 
 /// The matrices of a tower; f: free, s: fixed degrees of freedom.
 struct Assembly {
@@ -29,7 +23,7 @@ struct Assembly {
   SparseMatrix axial;       ///< n_bars x n_free: bar forces [N], tension positive, from free displacements
   Eigen::VectorXd springs;  ///< n_free: stiffness of the support spring at each free dof [N/m]
   std::vector<Link> links;  ///< springs between nodes that are no bars
-  std::vector<DirectedSpring> stabilisers;  ///< one for each direction of each stabilised node
+  std::vector<NeighbourSpring> stabilisers;  ///< one for each direction of each stabilised node
 };
 
 /// \throws ComputationError if a coefficient is not finite.    Cost: linear in nodes and bars.

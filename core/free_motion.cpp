@@ -3,6 +3,7 @@
 #include <algorithm>
 #include <array>
 #include <cmath>
+#include <cstdint>
 #include <numeric>
 #include <utility>
 
@@ -24,9 +25,10 @@ using Factor = Eigen::SimplicialLDLT<SparseMatrix>;
 // 1e-5.
 constexpr double kOpen = 1e-10;
 // Lifts the pivot of a free motion out of the rounding, to a few times its own size.
-constexpr double kLift = 1e-10;
+constexpr double kLift = 1e-13;
 // Pivots below this share of their diagonal make a degree of freedom suspect. Towers that stand have such
-// pivots where they are very slender; that costs them a second look.
+// pivots where they are very slender; that costs them a second look. A free motion that hardly moves the
+// degree of freedom eliminated last has a larger pivot: it is found by iteration.
 constexpr double kSuspectPivot = 1e-6;
 // Squared elongations of a motion of unit length. Rounding leaves 1e-24; the softest tower that stands 1e-14.
 constexpr double kNoStrain = 1e-20;
@@ -98,8 +100,11 @@ class Search {
     for (const Link& link : links_) {
       for (const Index other : link.others) open_[dofs_.node_of(other)].clear();
     }
-    for (const DirectedSpring& spring : stabilisers_) {
-      hold(spring.node, spring.direction);
+    for (const NeighbourSpring& spring : stabilisers_) {
+      for (const auto& [dof, value] : spring.elongation) {
+        if (dofs_.free(dof) >= 0) elongation_.emplace_back(rows_, dofs_.free(dof), value);
+      }
+      ++rows_;
       open_[spring.node].clear();
     }
     for (std::size_t node = 0; node < tower_.nodes.size(); ++node) {
@@ -176,12 +181,14 @@ class Search {
       const Eigen::Matrix<double, 3, 6> rest = without_open(node, motion);
       moves += rest.transpose() * rest;
     }
-    for (const DirectedSpring& spring : stabilisers_) {
+    for (const NeighbourSpring& spring : stabilisers_) {
       if (!std::binary_search(nodes.begin(), nodes.end(), spring.node)) continue;
-      const Eigen::Matrix<double, 1, 6> along = spring.direction.transpose() * motion_at(spring.node);
-      opposed += along.transpose() * along;
+      Eigen::Matrix<double, 1, 6> strain = Eigen::Matrix<double, 1, 6>::Zero();
+      for (const auto& [dof, value] : spring.elongation)
+        strain += value * motion_at(dofs_.node_of(dof)).row(index_of(dofs_.axis_of(dof)));
+      opposed += strain.transpose() * strain;
     }
-    const Eigen::SelfAdjointEigenSolver<Matrix6d> solver(opposed);
+    const Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd> solver(opposed);
     Index ways = 0;
     while (ways < 6 && solver.eigenvalues()(ways) <= kOpen) ++ways;
     if (ways == 0) return;
@@ -261,6 +268,15 @@ class Search {
         held.coeffRef(i, i) += 1.0;
         ++fresh;
       }
+      if (fresh == 0) {
+        const Index left = still_free(elongation, suspects);
+        if (left >= 0 && !suspect[static_cast<std::size_t>(left)]) {
+          suspect[static_cast<std::size_t>(left)] = true;
+          suspects.push_back(left);
+          held.coeffRef(left, left) += 1.0;
+          ++fresh;
+        }
+      }
       if (fresh > 0) continue;
       if (suspects.empty()) return;
       factor_.compute(held);
@@ -283,6 +299,26 @@ class Search {
       if (!(pivots(i) > kSuspectPivot * std::max(1.0, diagonal(dof)))) result.push_back(dof);
     }
     return result;
+  }
+
+  // The degree of freedom that moves most in a motion that strains nothing and moves no suspect; -1 if there
+  // is none. Inverse iteration with the lifted matrix: what is left free has the lift alone for an
+  // eigenvalue.
+  [[nodiscard]] Index still_free(const SparseMatrix& elongation, const std::vector<Index>& suspects) const {
+    Eigen::VectorXd motion(elongation.cols());
+    std::uint64_t state = 20'011;  // fixed, so that the same tower gives the same list
+    for (double& value : motion) {
+      state = state * 6364136223846793005ULL + 1442695040888963407ULL;
+      value = static_cast<double>(state >> 11U) / 9007199254740992.0 - 0.5;
+    }
+    constexpr int steps = 6;
+    for (int step = 0; step < steps; ++step) motion = factor_.solve(motion).normalized();
+    double strain = (elongation * motion).squaredNorm();
+    for (const Index suspect : suspects) strain += motion(suspect) * motion(suspect);
+    if (!(strain < kNoStrain)) return -1;
+    Index most = 0;
+    motion.cwiseAbs().maxCoeff(&most);
+    return most;
   }
 
   // Column i is 1 at suspect i and 0 at the others where it strains nothing; those that do are set against
@@ -366,7 +402,7 @@ class Search {
   const Tower& tower_;
   const DofMap& dofs_;
   const std::vector<Link>& links_;
-  const std::vector<DirectedSpring>& stabilisers_;
+  const std::vector<NeighbourSpring>& stabilisers_;
   Triplets elongation_;
   Index rows_ = 0;
   std::vector<bool> held_;                          // n_dof: fixed or on a spring

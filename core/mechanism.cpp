@@ -142,7 +142,7 @@ class Report {
     }
     add_cures(group);
     group.cures.push_back(
-        fmt::format("or, where {} no load, 'supports: [{{nodes: [{}], stabilise: 1 MN/m}}]'",
+        fmt::format("or, where {} no load, 'supports: [{{nodes: [{}], stabilise: 10 MN/m}}]'",
                     group.count() == 1 ? "it carries" : "they carry",
                     group.count() == 1 ? name(first.parts.front().node) : "..."));
   }
@@ -242,8 +242,10 @@ MechanismReport find_mechanisms(const Tower& tower, const Assembly& assembly) {
   report.complete = motions.complete;
   report.maxwell = {static_cast<Index>(tower.bars.size()),
                     assembly.dofs.fixed_count() + (assembly.springs.array() > 0.0).count() +
-                        static_cast<Index>(assembly.links.size()),
+                        static_cast<Index>(assembly.links.size() + assembly.stabilisers.size()),
                     assembly.dofs.dof_count()};
+  // States of self-stress cannot be fewer than none: what is missing was not found.
+  if (report.maxwell.surplus() + static_cast<Index>(motions.list.size()) < 0) report.complete = false;
   if (motions.list.empty()) return report;
   report.mechanisms = Report(tower, std::move(motions)).run();
   return report;

@@ -80,7 +80,7 @@ struct Support {
   std::optional<Pad> pad = {};  ///< that the springs were computed from
 };
 
-/// A spring to the ground against the directions in which a node is free with its neighbours held.
+/// A spring between a node and its neighbours in the directions in which the node is free by itself.
 struct Stabiliser {
   std::size_t node = 0;
   double stiffness = 0.0;  ///< [N/m] > 0

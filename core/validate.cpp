@@ -76,9 +76,14 @@ void validate(const Tower& tower, FaultList& faults) {
 void check_stabilisers(const Tower& tower, FaultList& faults) {
   // Bars that could not be read may be what holds a node, or what leaves it free.
   if (tower.stabilisers.empty() || !faults.empty()) return;
+  std::vector<bool> joined(tower.nodes.size(), false);
+  for (const Bar& bar : tower.bars) joined[bar.from] = joined[bar.to] = true;
   const auto open = open_directions(tower);
   for (const Stabiliser& stabiliser : tower.stabilisers) {
-    if (open[stabiliser.node].empty())
+    if (!joined[stabiliser.node]) {
+      faults.add(stabiliser.place,
+                 wording::stabilise_without_bars(excerpt(tower.nodes[stabiliser.node].name)));
+    } else if (open[stabiliser.node].empty())
       faults.add(stabiliser.place, wording::nothing_to_stabilise(excerpt(tower.nodes[stabiliser.node].name)));
   }
 }

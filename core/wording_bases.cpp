@@ -29,6 +29,10 @@ Message stabilised_twice(std::string_view node, Place first) {
   return {fmt::format("node '{}' is stabilised twice, first in line {}", node, first.line),
           "remove it from one of the lists"};
 }
+Message stabilise_without_bars(std::string_view node) {
+  return {fmt::format("no bar joins node '{}', and 'stabilise' holds a node against its neighbours", node),
+          "join it to the tower by bars, or remove it"};
+}
 Message nothing_to_stabilise(std::string_view node) {
   return {
       fmt::format("node '{}' is not free in a direction of its own, so that 'stabilise' has nothing to hold",

@@ -13,6 +13,7 @@ namespace swaymark::wording {
 [[nodiscard]] Message pad_without_stiffness();
 [[nodiscard]] Message poisson_out_of_range(double value);
 [[nodiscard]] Message stabilised_twice(std::string_view node, Place first);
+[[nodiscard]] Message stabilise_without_bars(std::string_view node);
 [[nodiscard]] Message nothing_to_stabilise(std::string_view node);
 [[nodiscard]] Message study_is_a_range(std::string_view came);
 [[nodiscard]] Message study_reversed(double from, double to);

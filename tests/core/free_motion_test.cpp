@@ -302,4 +302,60 @@ TEST_CASE("a tank moves with a tower on too few supports") {
   CHECK(motions_of(tower).list.size() == 3);
 }
 
+TEST_CASE("a panel without a diagonal sways however little its posts lean") {
+  for (const double slope : {2.0, 5.0, 20.0, 71.0, 100.0, 200.0, 500.0, 1000.0, 3000.0}) {
+    Tower tower = bare_tower(2);
+    fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
+    fix(tower, add_node(tower, {4.0, 0.0, 0.0}));
+    add_node(tower, {3.0 / slope, 0.0, 3.0});
+    add_node(tower, {4.0 - 3.0 / slope, 0.0, 3.0});
+    add_bar(tower, 0, 2);
+    add_bar(tower, 1, 3);
+    add_bar(tower, 2, 3);
+    INFO("slope 1:" << slope);
+    const FreeMotions motions = motions_of(tower);
+    CHECK(motions.list.size() == 1);
+    check_sound(tower, motions);
+  }
+}
+
+TEST_CASE("a tapering tower without diagonals in one panel moves in three ways whatever its taper") {
+  for (const double slope : {5.0, 50.0, 100.0, 200.0, 400.0, 800.0}) {
+    Tower tower = bare_tower(3);
+    for (int level = 0; level <= 3; ++level) {
+      const double half = 1.0 - 2.0 * level / slope;
+      const std::size_t first = tower.nodes.size();
+      for (const auto& [x, y] : {std::pair{-half, -half}, {half, -half}, {half, half}, {-half, half}}) {
+        const std::size_t node = add_node(tower, {x, y, 2.0 * level});
+        if (level == 0) fix(tower, node);
+        if (level > 0) add_bar(tower, node - 4, node);
+      }
+      if (level == 0) continue;
+      for (std::size_t i = 0; i < 4; ++i) {
+        add_bar(tower, first + i, first + (i + 1) % 4);
+        if (level == 2) continue;
+        add_bar(tower, first - 4 + i, first + (i + 1) % 4);
+        add_bar(tower, first - 4 + (i + 1) % 4, first + i);
+      }
+      add_bar(tower, first, first + 2);
+    }
+    INFO("slope 1:" << slope);
+    CHECK(motions_of(tower).list.size() == 3);
+    CHECK(motions_of(tower).list.size() == strainless_count(tower));
+  }
+}
+
+TEST_CASE("free motions that hardly move the last degree of freedom are found") {
+  Tower tower = bare_tower(3);
+  for (const Eigen::Vector3d& at :
+       {Eigen::Vector3d(60, 0, 0), Eigen::Vector3d(20, 50, 0), Eigen::Vector3d(1, 1, 30),
+        Eigen::Vector3d(59, 1, 30), Eigen::Vector3d(19, 49, 30)})
+    add_node(tower, at);
+  for (const auto& [from, to] : {std::pair<std::size_t, std::size_t>{0, 3}, {0, 4}, {1, 4}, {2, 3}, {3, 4}})
+    add_bar(tower, from, to);
+  fix(tower, 0);
+  fix(tower, 1);
+  check_sound(tower, motions_of(tower));
+}
+
 }  // namespace swaymark::test

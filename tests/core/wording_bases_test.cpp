@@ -24,6 +24,7 @@ TEST_CASE("faults of springs that stabilise name the node and the way out") {
   CHECK_THAT(wording::stabilised_twice("m1", {7, 3}).what,
              Catch::Contains("'m1'") && Catch::Contains("line 7"));
   CHECK_THAT(wording::nothing_to_stabilise("m1").what, Catch::Contains("'m1'"));
+  CHECK_THAT(wording::stabilise_without_bars("m1").what, Catch::Contains("no bar joins node 'm1'"));
   CHECK_THAT(wording::nothing_to_stabilise("m1").cure, Catch::Contains("bar"));
 }
 
