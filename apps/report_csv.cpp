@@ -87,7 +87,7 @@ NamedText bands_sheet(const Analysis& a) {
   sheet.end_row();
   const auto numbers = [](const std::vector<Index>& modes) {
     std::string text;
-    for (const Index mode : modes) text += (text.empty() ? "" : " ") + std::to_string(mode + 1);
+    for (const Index mode : modes) text += fmt::format("{}{}", text.empty() ? "" : " ", mode + 1);
     return text;
   };
   for (std::size_t b = 0; b < a.bands.size(); ++b) {
