@@ -10,10 +10,6 @@ function(swaymark_target_settings target)
                                              -Wnon-virtual-dtor -Woverloaded-virtual -Werror)
     # GCC 12 sees an overlap in "text" + std::string that is not there (its bug 105651).
     target_compile_options(${target} PRIVATE $<$<CXX_COMPILER_ID:GNU>:-Wno-restrict>)
-    if(SWAYMARK_PRECOMPILE)
-      # Likewise where it inlines std::string from a precompiled header.
-      target_compile_options(${target} PRIVATE $<$<CXX_COMPILER_ID:GNU>:-Wno-stringop-overflow>)
-    endif()
   endif()
 endfunction()
 
