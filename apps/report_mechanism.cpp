@@ -46,6 +46,19 @@ std::string motion_lines(const Tower& tower, const Mechanism& mechanism) {
   return out;
 }
 
+// Whether a node that the pattern leaves loose is free by itself or in a shape; a body on too few supports
+// moves as one.
+bool any_moves_alone(const MechanismReport& report, const LooseNodes& loose) {
+  for (const Mechanism& mechanism : report.mechanisms) {
+    for (const FreeMotion& motion : mechanism.motions) {
+      if (motion.found_as == MotionClass::body) continue;
+      const std::size_t node = motion.parts.front().node;
+      if (std::find(loose.nodes.begin(), loose.nodes.end(), node) != loose.nodes.end()) return true;
+    }
+  }
+  return false;
+}
+
 std::string arithmetic(const MechanismReport& report) {
   const MaxwellCount& count = report.maxwell;
   std::string line = fmt::format("  bars {} + restraints {} - degrees of freedom {} = {}", count.bars,
@@ -75,6 +88,7 @@ std::string mechanism_text(const Analysis& analysis) {
   }
   if (list.size() > kMostMechanisms) out += fmt::format("  ... and {} more\n", list.size() - kMostMechanisms);
   for (const LooseNodes& loose : analysis.tower.lattice_leaves_loose) {
+    if (!any_moves_alone(report, loose)) continue;  // held by what was written by hand
     out += wrapped(loose.what, "  the pattern: ", kColumns);
     for (const std::string& cure : loose.cures) out += wrapped(cure, "     cure: ", kColumns);
   }

@@ -191,8 +191,9 @@ std::string scenario_line(const Study& study) {
     return !scenario.computed() || unmet(*scenario.analysis) > 0;
   });
   if (bad == 0)
-    return fmt::format("All checks are met in {}.\n",
-                       total == 1 ? "the scenario, too" : fmt::format("all {} scenarios", total));
+    return fmt::format("All checks are met in {}.\n", total == 1   ? "the scenario, too"
+                                                      : total == 2 ? "both scenarios"
+                                                                   : fmt::format("all {} scenarios", total));
   return fmt::format("{} of {} miss{} a check or cannot be computed: see SCENARIOS.\n", bad,
                      counted(static_cast<Index>(total), "scenario"), bad == 1 ? "es" : "");
 }

@@ -110,6 +110,7 @@ std::vector<std::string> Cures::supports(const std::vector<FreeMotion>& motions)
   // Of the largest motion, this much will do where a support stands already or lower: it is the smaller
   // change.
   constexpr double enough = 0.5;
+  constexpr double enough_at_support = 0.02;
   Eigen::MatrixXd left =
       Eigen::MatrixXd::Zero(3 * static_cast<Index>(tower_.nodes.size()), static_cast<Index>(motions.size()));
   for (std::size_t k = 0; k < motions.size(); ++k) {
@@ -122,7 +123,8 @@ std::vector<std::string> Cures::supports(const std::vector<FreeMotion>& motions)
     const double largest = motion.maxCoeff();
     Index best = -1;
     for (Index dof = 0; dof < motion.size(); ++dof) {
-      if (motion(dof) < enough * largest) continue;
+      const bool supported = supported_[static_cast<std::size_t>(dof / 3)];
+      if (motion(dof) < (supported ? enough_at_support : enough) * largest) continue;
       if (best < 0 || is_smaller_change(dof, best, motion)) best = dof;
     }
     left.col(k) /= left(best, k);

@@ -53,4 +53,18 @@ TEST_CASE("no line on mechanisms is wider than a page or has a minus sign before
   }
 }
 
+TEST_CASE("the pattern of a lattice is told only while a node of it is free") {
+  const auto text_of = [](const std::string& supports) {
+    return mechanism_text(checked(
+        "swaymark: 1\nmaterials: {steel: {E: 210 GPa, density: 7850}}\nsections: {leg: {area: 20 cm2}}\n"
+        "lattice: {plan: square, width: 2, material: steel, panels: [{height: 3, width: 2, legs: leg, "
+        "diagonals: leg, horizontals: leg, plan_bracing: leg, bracing: K}]}\n"
+        "nodes: {alone: [9, 9, 9]}\nsupports:\n  - {nodes: base, fixed: [x, y, z]}\n" +
+        supports));
+  };
+  CHECK_THAT(text_of(""), Catch::Contains("the pattern: "));
+  CHECK_THAT(text_of("  - {nodes: [L1.m1, L1.m2, L1.m3, L1.m4], stabilise: 10 MN/m}\n"),
+             !Catch::Contains("the pattern: ") && Catch::Contains("loose node"));
+}
+
 }  // namespace swaymark::test

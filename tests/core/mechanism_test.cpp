@@ -113,6 +113,20 @@ TEST_CASE("the supports named for a tower on too few hold it together") {
   CHECK_FALSE(report_of(tower).any());
 }
 
+TEST_CASE("a tower whose feet may lift is held at its feet and not aloft") {
+  Tower tower = regular_mast({});
+  for (Support& support : tower.supports) support.fixed = {true, true, false};
+  const MechanismReport report = report_of(tower);
+  REQUIRE(kinds_of(report) == Kinds{"tower on too few supports"});
+  REQUIRE(report.mechanisms[0].cures.size() == 3);
+  for (const std::string& cure : report.mechanisms[0].cures) {
+    INFO(cure);
+    CHECK_THAT(cure, Catch::Contains("along z"));
+    const std::size_t node = std::stoul(cure.substr(10)) - 1;
+    CHECK(tower.nodes[node].position.z() == 0.0);
+  }
+}
+
 TEST_CASE("a part that no bar joins to the tower is told as such") {
   Tower tower = regular_mast({});
   const std::size_t first = tower.nodes.size();
