@@ -168,12 +168,7 @@ Analysis analysis_of(Tower tower, Provenance provenance, Scope scope, SharedWork
   const SparseMatrix& mass = analysis.assembly.mass;
   if (mass.rows() == 0)
     throw ComputationError({"nothing is free to move", "leave at least one axis of one node free"});
-  const auto& axes = analysis.assembly.dofs.axes();
-  Eigen::MatrixXd drive(mass.rows(), static_cast<Index>(axes.size()));
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    drive.col(static_cast<Index>(k)) =
-        inertia_vector(analysis.assembly, rigid_translation(analysis.assembly.dofs, axes[k]));
-  }
+  const Eigen::MatrixXd drive = inertia_vectors(analysis.assembly);
   const Eigenproblem problem = shared != nullptr
                                    ? Eigenproblem(stiffness, mass, shared->factor(analysis.assembly))
                                    : Eigenproblem(stiffness, mass);

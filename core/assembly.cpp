@@ -189,4 +189,12 @@ Eigen::VectorXd inertia_vector(const Assembly& assembly, const Eigen::VectorXd& 
   return assembly.dofs.free_part(assembly.mass_all * rigid);
 }
 
+Eigen::MatrixXd inertia_vectors(const Assembly& assembly) {
+  const auto& axes = assembly.dofs.axes();
+  Eigen::MatrixXd drive(assembly.mass.rows(), static_cast<Index>(axes.size()));
+  for (std::size_t k = 0; k < axes.size(); ++k)
+    drive.col(static_cast<Index>(k)) = inertia_vector(assembly, rigid_translation(assembly.dofs, axes[k]));
+  return drive;
+}
+
 }  // namespace swaymark

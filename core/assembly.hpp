@@ -41,4 +41,7 @@ struct Assembly {
 /// r replaced by a tilt it gives the moment of the inertia forces.
 [[nodiscard]] Eigen::VectorXd inertia_vector(const Assembly& assembly, const Eigen::VectorXd& rigid);
 
+/// b of a translation along each axis [kg], n_free x n_axes: column k belongs to the tower's k-th axis.
+[[nodiscard]] Eigen::MatrixXd inertia_vectors(const Assembly& assembly);
+
 }  // namespace swaymark

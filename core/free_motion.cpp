@@ -3,14 +3,13 @@
 #include <algorithm>
 #include <array>
 #include <cmath>
-#include <cstdint>
 #include <numeric>
 #include <utility>
 
 #include <Eigen/Eigenvalues>
-#include <Eigen/SparseCholesky>
 
 #include "core/open_direction.hpp"
+#include "core/strainless.hpp"
 
 namespace swaymark {
 
@@ -19,22 +18,11 @@ namespace {
 using Matrix6d = Eigen::Matrix<double, 6, 6>;
 using Vector6d = Eigen::Matrix<double, 6, 1>;
 using Triplets = std::vector<Eigen::Triplet<double>>;
-using Factor = Eigen::SimplicialLDLT<SparseMatrix>;
 
 // A direction counts as open where its bars oppose it by less than this much of unit stiffness; a slope of
 // 1e-5.
 constexpr double kOpen = 1e-10;
-// Lifts the pivot of a free motion out of the rounding, to a few times its own size.
-constexpr double kLift = 1e-13;
-// Pivots below this share of their diagonal make a degree of freedom suspect. Towers that stand have such
-// pivots where they are very slender; that costs them a second look. A free motion that hardly moves the
-// degree of freedom eliminated last has a larger pivot: it is found by iteration.
-constexpr double kSuspectPivot = 1e-6;
-// Squared elongations of a motion of unit length. Rounding leaves 1e-24; the softest tower that stands 1e-14.
-constexpr double kNoStrain = 1e-20;
-constexpr double kMoves = 1e-6;        // of the largest component: below it a node stands still
-constexpr Index kMostSuspects = 4000;  // suspects that are looked at
-constexpr Index kMostDense = 600;      // suspects that stand for no free motion by themselves
+constexpr double kMoves = 1e-6;  // of the largest component: below it a node stands still
 
 class Search {
  public:
@@ -248,121 +236,11 @@ class Search {
   }
 
   void look_at_the_whole() {
-    const Index n = dofs_.free_count();
-    SparseMatrix elongation(rows_, n);
+    SparseMatrix elongation(rows_, dofs_.free_count());
     elongation.setFromTriplets(elongation_.begin(), elongation_.end());
-    SparseMatrix stiffness = elongation.transpose() * elongation;
-    std::vector<Index> suspects;
-    std::vector<bool> suspect(static_cast<std::size_t>(n), false);
-    // What is suspect gets a unit spring, until nothing is: the matrix is then regular for certain.
-    for (SparseMatrix held = stiffness;;) {
-      SparseMatrix lifted = held;
-      for (Index i = 0; i < n; ++i) lifted.coeffRef(i, i) += kLift;
-      factor_.compute(lifted);
-      const std::vector<Index> more = suspect_pivots(lifted);
-      std::size_t fresh = 0;
-      for (const Index i : more) {
-        if (suspect[static_cast<std::size_t>(i)]) continue;
-        suspect[static_cast<std::size_t>(i)] = true;
-        suspects.push_back(i);
-        held.coeffRef(i, i) += 1.0;
-        ++fresh;
-      }
-      if (fresh == 0) {
-        const Index left = still_free(elongation, suspects);
-        if (left >= 0 && !suspect[static_cast<std::size_t>(left)]) {
-          suspect[static_cast<std::size_t>(left)] = true;
-          suspects.push_back(left);
-          held.coeffRef(left, left) += 1.0;
-          ++fresh;
-        }
-      }
-      if (fresh > 0) continue;
-      if (suspects.empty()) return;
-      factor_.compute(held);
-      break;
-    }
-    if (static_cast<Index>(suspects.size()) > kMostSuspects) {
-      suspects.resize(static_cast<std::size_t>(kMostSuspects));
-      found_.complete = false;
-    }
-    take_motions(elongation, suspects);
-  }
-
-  [[nodiscard]] std::vector<Index> suspect_pivots(const SparseMatrix& matrix) const {
-    const Eigen::VectorXd pivots = factor_.vectorD();
-    const Eigen::VectorXd diagonal = matrix.diagonal();
-    const auto& order = factor_.permutationPinv().indices();  // place in the factor -> degree of freedom
-    std::vector<Index> result;
-    for (Index i = 0; i < pivots.size(); ++i) {
-      const Index dof = order.size() > 0 ? order(i) : i;
-      if (!(pivots(i) > kSuspectPivot * std::max(1.0, diagonal(dof)))) result.push_back(dof);
-    }
-    return result;
-  }
-
-  // The degree of freedom that moves most in a motion that strains nothing and moves no suspect; -1 if there
-  // is none. Inverse iteration with the lifted matrix: what is left free has the lift alone for an
-  // eigenvalue.
-  [[nodiscard]] Index still_free(const SparseMatrix& elongation, const std::vector<Index>& suspects) const {
-    Eigen::VectorXd motion(elongation.cols());
-    std::uint64_t state = 20'011;  // fixed, so that the same tower gives the same list
-    for (double& value : motion) {
-      state = state * 6364136223846793005ULL + 1442695040888963407ULL;
-      value = static_cast<double>(state >> 11U) / 9007199254740992.0 - 0.5;
-    }
-    constexpr int steps = 6;
-    for (int step = 0; step < steps; ++step) motion = factor_.solve(motion).normalized();
-    double strain = (elongation * motion).squaredNorm();
-    for (const Index suspect : suspects) strain += motion(suspect) * motion(suspect);
-    if (!(strain < kNoStrain)) return -1;
-    Index most = 0;
-    motion.cwiseAbs().maxCoeff(&most);
-    return most;
-  }
-
-  // Column i is 1 at suspect i and 0 at the others where it strains nothing; those that do are set against
-  // each other, since a free motion may need several of them.
-  void take_motions(const SparseMatrix& elongation, const std::vector<Index>& suspects) {
-    const Index n = elongation.cols();
-    std::vector<Eigen::VectorXd> strained;
-    for (const Index suspect : suspects) {
-      const Eigen::VectorXd motion = factor_.solve(Eigen::VectorXd(Eigen::VectorXd::Unit(n, suspect)));
-      if ((elongation * motion).squaredNorm() < kNoStrain * motion.squaredNorm()) {
-        add_shape(motion);
-      } else {
-        strained.push_back(motion.normalized());
-      }
-    }
-    const auto left = static_cast<Index>(strained.size());
-    if (left == 0) return;
-    if (left > kMostDense) {
-      found_.complete = false;
-      return;
-    }
-    Eigen::MatrixXd basis(n, left);
-    for (Index j = 0; j < left; ++j) basis.col(j) = strained[static_cast<std::size_t>(j)];
-    take_combinations(elongation, basis);
-  }
-
-  void take_combinations(const SparseMatrix& elongation, const Eigen::MatrixXd& basis) {
-    const Eigen::MatrixXd strains = elongation * basis;
-    const Eigen::SelfAdjointEigenSolver<Eigen::MatrixXd> solver(strains.transpose() * strains);
-    std::vector<Eigen::VectorXd> motions;
-    for (Index j = 0; j < basis.cols(); ++j) {
-      const Eigen::VectorXd motion = basis * solver.eigenvectors().col(j);
-      if ((elongation * motion).squaredNorm() >= kNoStrain * motion.squaredNorm()) break;
-      motions.push_back(motion);
-    }
-    for (std::size_t k = 0; k < motions.size(); ++k) {
-      Index at = 0;
-      motions[k].cwiseAbs().maxCoeff(&at);
-      motions[k] /= motions[k](at);
-      for (std::size_t j = 0; j < motions.size(); ++j) {
-        if (j != k) motions[j] -= motions[j](at) * motions[k];
-      }
-    }
-    for (const Eigen::VectorXd& motion : motions) add_shape(motion);
+    const StrainlessMotions whole = strainless_motions(elongation);
+    found_.complete = whole.complete;
+    for (const Eigen::VectorXd& motion : whole.motions) add_shape(motion);
   }
 
   void add_shape(const Eigen::VectorXd& motion) {
@@ -407,7 +285,6 @@ class Search {
   Index rows_ = 0;
   std::vector<bool> held_;                          // n_dof: fixed or on a spring
   std::vector<std::vector<Eigen::Vector3d>> open_;  // by node: unit directions free with the neighbours held
-  Factor factor_;
   FreeMotions found_;
 };
 

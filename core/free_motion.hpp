@@ -36,11 +36,8 @@ struct FreeMotions {
 /// stiffness, so that a soft bar is never taken for a missing one.
 ///
 /// First each node with its neighbours held: a direction that no bar or support opposes. With those held,
-/// each part that bars join as a rigid body on its supports. With those held as well, the whole: the pivots
-/// of the factorised unit stiffness point at degrees of freedom that may be free, unit springs are put there,
-/// and the displacements under a unit force at each are the free motions, each 1 at its own and 0 at the
-/// others. What decides is the elongations themselves, which are accurate to rounding where uT K u is not.
-/// Cost: one sparse factorisation where the tower is stable, two where it is not.
+/// each part that bars join as a rigid body on its supports. With those held as well, the whole:
+/// strainless_motions(). Cost: one sparse factorisation where the tower is stable.
 [[nodiscard]] FreeMotions find_free_motions(const Tower& tower, const Assembly& assembly);
 
 }  // namespace swaymark

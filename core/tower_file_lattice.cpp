@@ -6,6 +6,7 @@
 
 #include "core/lattice.hpp"
 #include "core/lattice_loose.hpp"
+#include "core/wording_lattice.hpp"
 
 namespace swaymark {
 

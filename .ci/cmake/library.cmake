@@ -20,6 +20,25 @@ function(swaymark_precompile target owner)
   endif()
 endfunction()
 
+# swaymark_embed(<variable> <namespace> <folder of data/> <suffix> <names>...): a source with the text of files, which the
+# program then does not need when it runs; <folder of this>/<namespace>.hpp declares its functions.
+function(swaymark_embed variable namespace folder suffix)
+  set(inputs ${ARGN})
+  list(TRANSFORM inputs PREPEND ${PROJECT_SOURCE_DIR}/data/${folder}/)
+  list(TRANSFORM inputs APPEND ${suffix})
+  set(output ${CMAKE_CURRENT_BINARY_DIR}/${namespace}.cpp)
+  cmake_path(GET CMAKE_CURRENT_SOURCE_DIR FILENAME here)
+  set(script ${PROJECT_SOURCE_DIR}/.ci/cmake/embed.cmake)
+  add_custom_command(
+    OUTPUT ${output}
+    COMMAND ${CMAKE_COMMAND} -DOUTPUT=${output} -DHEADER=${here}/${namespace}.hpp -DNAMESPACE=swaymark::${namespace}
+            "-DINPUTS=${inputs}" -P ${script}
+    DEPENDS ${inputs} ${script}
+    COMMENT "Embedding data/${folder}"
+    VERBATIM)
+  set(${variable} ${output} PARENT_SCOPE)
+endfunction()
+
 # swaymark_library(<folder> SOURCES ... HEADERS ... LINKS ... PRIVATE_LINKS ...)
 # makes the target swaymark_<folder> with the name swaymark::<folder>, the same before and after installing.
 function(swaymark_library folder)

@@ -32,15 +32,6 @@ struct Stage {
   Samples times = {};
 };
 
-Eigen::MatrixXd drives(const Assembly& assembly) {
-  const auto& axes = assembly.dofs.axes();
-  Eigen::MatrixXd drive(assembly.mass.rows(), static_cast<Index>(axes.size()));
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    drive.col(static_cast<Index>(k)) = inertia_vector(assembly, rigid_translation(assembly.dofs, axes[k]));
-  }
-  return drive;
-}
-
 // What the analysis asks of the modes of the bench tower: 90 % in x and y, and all up to the band's reach.
 ModeTarget target_of(const Tower& tower) {
   ModeTarget target;
@@ -84,7 +75,7 @@ void run(int rounds) {
   }
   const Tower tower = read_tower(tower_text(Units::bare), "bench.yaml");
   const Assembly assembly = assemble(tower);
-  const Eigen::MatrixXd drive = drives(assembly);
+  const Eigen::MatrixXd drive = inertia_vectors(assembly);
   const Eigenproblem problem(assembly.stiffness, assembly.mass);
   const auto modes = [&] {
     return find_modes(problem, assembly.stiffness, assembly.mass, drive, target_of(tower));

@@ -7,19 +7,6 @@ namespace swaymark::test {
 
 namespace {
 
-// Two posts and a beam without a diagonal: nodes 1 and 2 held, 3 and 4 above them.
-Tower portal() {
-  Tower tower = bare_tower(2);
-  fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
-  fix(tower, add_node(tower, {2.0, 0.0, 0.0}));
-  add_node(tower, {0.0, 0.0, 2.0});
-  add_node(tower, {2.0, 0.0, 2.0});
-  add_bar(tower, 0, 2);
-  add_bar(tower, 1, 3);
-  add_bar(tower, 2, 3);
-  return tower;
-}
-
 FreeMotions motions_of(const Tower& tower) { return find_free_motions(tower, assemble(tower)); }
 
 using Words = std::vector<std::string>;

@@ -72,19 +72,6 @@ Tower flat_panel() {
   return tower;
 }
 
-// Two posts and a beam without a diagonal.
-Tower portal() {
-  Tower tower = bare_tower(2);
-  fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
-  fix(tower, add_node(tower, {2.0, 0.0, 0.0}));
-  add_node(tower, {0.0, 0.0, 2.0});
-  add_node(tower, {2.0, 0.0, 2.0});
-  add_bar(tower, 0, 2);
-  add_bar(tower, 1, 3);
-  add_bar(tower, 2, 3);
-  return tower;
-}
-
 // A line of bars between two held ends, straight or with a rise in the middle.
 Tower line(int dimensions, int bars, double rise = 0.0) {
   Tower tower = bare_tower(dimensions);
@@ -245,7 +232,7 @@ TEST_CASE("a spring however soft holds what nothing else does") {
 TEST_CASE("free motions of several kinds are all found at once") {
   Tower tower = portal();
   add_node(tower, {7.0, 0.0, 7.0});
-  const std::size_t hung = add_node(tower, {0.0, 0.0, 3.0});
+  const std::size_t hung = add_node(tower, {0.0, 0.0, 4.0});
   add_bar(tower, 2, hung);
   const FreeMotions motions = motions_of(tower);
   check_sound(tower, motions);
@@ -304,14 +291,7 @@ TEST_CASE("a tank moves with a tower on too few supports") {
 
 TEST_CASE("a panel without a diagonal sways however little its posts lean") {
   for (const double slope : {2.0, 5.0, 20.0, 71.0, 100.0, 200.0, 500.0, 1000.0, 3000.0}) {
-    Tower tower = bare_tower(2);
-    fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
-    fix(tower, add_node(tower, {4.0, 0.0, 0.0}));
-    add_node(tower, {3.0 / slope, 0.0, 3.0});
-    add_node(tower, {4.0 - 3.0 / slope, 0.0, 3.0});
-    add_bar(tower, 0, 2);
-    add_bar(tower, 1, 3);
-    add_bar(tower, 2, 3);
+    const Tower tower = portal(1.0 / slope);
     INFO("slope 1:" << slope);
     const FreeMotions motions = motions_of(tower);
     CHECK(motions.list.size() == 1);

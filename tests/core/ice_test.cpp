@@ -15,7 +15,7 @@ IceMass glaze(double thickness, std::optional<double> from = {}, std::optional<d
 }
 
 // A post from z = 0 to 4 m, a beam at z = 4 m and a beam at z = 0.
-Tower portal() {
+Tower frame() {
   Tower tower = bare_tower(3);
   tower.sections[0].perimeter = 0.5;
   add_node(tower, {0.0, 0.0, 0.0});
@@ -48,7 +48,7 @@ TEST_CASE("ice around a circle is the ring between two circles") {
 }
 
 TEST_CASE("a bar carries the share of its length that lies within the heights") {
-  const Tower tower = portal();
+  const Tower tower = frame();
   const Bar& post = tower.bars[0];
   CHECK(iced_share(tower, glaze(0.02), post) == 1.0);
   CHECK(iced_share(tower, glaze(0.02, 1.0), post) == 0.75);
@@ -60,7 +60,7 @@ TEST_CASE("a bar carries the share of its length that lies within the heights") 
 }
 
 TEST_CASE("a level bar belongs to one of two ranges that meet at its height") {
-  const Tower tower = portal();
+  const Tower tower = frame();
   const Bar& beam = tower.bars[1];
   CHECK(iced_share(tower, glaze(0.02, 1.0, 4.0), beam) == 1.0);
   CHECK(iced_share(tower, glaze(0.02, 4.0, 9.0), beam) == 0.0);
@@ -70,7 +70,7 @@ TEST_CASE("a level bar belongs to one of two ranges that meet at its height") {
 }
 
 TEST_CASE("ranges that meet add up to the ice of the whole") {
-  const Tower tower = portal();
+  const Tower tower = frame();
   for (const Bar& bar : tower.bars) {
     const double whole = ice_on_bar(tower, glaze(0.02), bar, 3.0);
     const double parts = ice_on_bar(tower, glaze(0.02, 0.0, 1.3), bar, 3.0) +
@@ -81,7 +81,7 @@ TEST_CASE("ranges that meet add up to the ice of the whole") {
 }
 
 TEST_CASE("ice of another group lies on none of a bar") {
-  const Tower tower = portal();
+  const Tower tower = frame();
   IceMass ice = glaze(0.02);
   ice.group = 0;
   CHECK(ice_on_bar(tower, ice, tower.bars[0], 4.0) > 0.0);

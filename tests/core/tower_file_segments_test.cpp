@@ -3,6 +3,7 @@
 #include <catch2/catch.hpp>
 
 #include "tests/core/drawn.hpp"
+#include "tests/core/written.hpp"
 #include "tests/support/files.hpp"
 #include "tests/support/matchers.hpp"
 
@@ -33,17 +34,7 @@ TEST_CASE("the demo tower drawn by segments is the same tower") {
     lines += fmt::format("{:.6f},{:.6f},{:.6f},{:.6f},{:.6f},{:.6f},{}\n", from.x() + off, from.y(), from.z(),
                          to.x(), to.y() - off, to.z(), written.groups[bar.group].name);
   }
-  std::string text = "swaymark: 1\nsegments_from: lines.csv\nsections: {";
-  for (const Section& section : written.sections)
-    text += fmt::format("{}: {{area: {}}}, ", section.name, section.area);
-  text += "}\nmaterials: {";
-  for (const Material& material : written.materials)
-    text +=
-        fmt::format("{}: {{E: {}, density: {}}}, ", material.name, material.youngs_modulus, material.density);
-  text += "}\nmembers:\n";
-  for (const Group& group : written.groups)
-    text += fmt::format("  - {{group: {}, section: {}, material: {}}}\n", group.name,
-                        written.sections[group.section].name, written.materials[group.material].name);
+  std::string text = "swaymark: 1\nsegments_from: lines.csv\n" + parts_of(written);
   text += "nodes:\n";  // named by hand, so that all stand where they are written
   for (const Node& node : written.nodes)
     text += fmt::format("  {}: [{}, {}, {}]\n", node.name, node.position.x(), node.position.y(),

@@ -3,6 +3,7 @@
 #include <catch2/catch.hpp>
 
 #include "tests/core/tower_text.hpp"
+#include "tests/core/written.hpp"
 #include "tests/support/beside.hpp"
 #include "tests/support/matchers.hpp"
 
@@ -56,17 +57,7 @@ TEST_CASE("the demo tower with its nodes and bars in tables is the same tower") 
     bars += fmt::format("{},{},{},{}\n", written.groups[bar.group].name, written.nodes[bar.to].name,
                         written.nodes[bar.from].name, written.bar_name(b));
   }
-  std::string text = "swaymark: 1\nnodes_from: nodes.csv\nbars_from: bars.csv\nsections: {";
-  for (const Section& section : written.sections)
-    text += fmt::format("{}: {{area: {}}}, ", section.name, section.area);
-  text += "}\nmaterials: {";
-  for (const Material& material : written.materials)
-    text +=
-        fmt::format("{}: {{E: {}, density: {}}}, ", material.name, material.youngs_modulus, material.density);
-  text += "}\nmembers:\n";
-  for (const Group& group : written.groups)
-    text += fmt::format("  - {{group: {}, section: {}, material: {}}}\n", group.name,
-                        written.sections[group.section].name, written.materials[group.material].name);
+  const std::string text = "swaymark: 1\nnodes_from: nodes.csv\nbars_from: bars.csv\n" + parts_of(written);
   const Tower tabled = tower_beside(text, {{"nodes.csv", nodes}, {"bars.csv", bars}});
   CHECK(difference(tabled, written, true).empty());
 }

@@ -2,6 +2,8 @@
 
 #include <catch2/catch.hpp>
 
+#include "tests/core/messages.hpp"
+
 namespace swaymark::test {
 
 namespace {
@@ -92,25 +94,12 @@ TEST_CASE("every message says what is wrong and what would cure it") {
                                    csv_separator(),
                                    csv_cells(2, 3)};
   messages.insert(messages.end(), plain.begin(), plain.end());
-  for (const Message& message : messages) {
-    INFO(message.what << "; " << message.cure);
-    CHECK(message.what.size() > 4);
-    CHECK(message.cure.size() > 4);
-    CHECK(message.what.back() != '.');
-    CHECK(message.cure.back() != '.');
-  }
+  check_sentences(messages);
 }
 
 TEST_CASE("words of the file cannot flood a message or break its line") {
-  for (const Message& message : messages_about(kLong + "\n\x1B[31m")) {
-    INFO(message.what);
-    CHECK(message.what.size() < 300);
-    CHECK(message.cure.size() < 300);
-  }
-  for (const Message& message : messages_about("a\nb\x1B[31m")) {
-    CHECK(message.what.find_first_of("\n\x1B") == std::string::npos);
-    CHECK(message.cure.find_first_of("\n\x1B") == std::string::npos);
-  }
+  check_sentences(messages_about(kLong + "\n\x1B[31m"));
+  check_sentences(messages_about("a\nb\x1B[31m"));
 }
 
 TEST_CASE("a slip of the pen is answered by the nearest word and anything else by all that are known") {
@@ -132,6 +121,7 @@ TEST_CASE("a percentage written as a bare number is shown both ways it could be 
   const Message message = wording::not_a_fraction("damping", "2", 2.0);
   CHECK(message.what == "'damping' is a fraction, and '2' is 200 %");
   CHECK(message.cure == "write '2 %' or 0.02 if that was meant");
+  CHECK(wording::not_a_fraction("area_factor", "1.1", 1.1).cure == "give a value between 0 % and 100 %");
   CHECK(wording::not_a_fraction("damping", "500", 500.0).cure == "give a value between 0 % and 100 %");
 }
 

@@ -12,20 +12,11 @@ Eigen::VectorXd vector_of(std::initializer_list<double> values) {
   return vector;
 }
 
-Eigen::MatrixXd drives(const Assembly& assembly) {
-  const auto& axes = assembly.dofs.axes();
-  Eigen::MatrixXd drive(assembly.mass.rows(), static_cast<Index>(axes.size()));
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    drive.col(static_cast<Index>(k)) = inertia_vector(assembly, rigid_translation(assembly.dofs, axes[k]));
-  }
-  return drive;
-}
-
 Vibrating::Vibrating(const Tower& stated)
     : tower(stated), assembly(assemble(tower)), problem(assembly.stiffness, assembly.mass) {
   ModeTarget target;
   target.count = tower.modes.count ? Index{*tower.modes.count} : problem.mode_count();
-  set = find_modes(problem, assembly.stiffness, assembly.mass, drives(assembly), target);
+  set = find_modes(problem, assembly.stiffness, assembly.mass, inertia_vectors(assembly), target);
   REQUIRE(set.modes.usable());
 }
 

@@ -18,9 +18,6 @@ inline constexpr double kStiff = 210e9 * 1e-3;
 
 [[nodiscard]] Eigen::VectorXd vector_of(std::initializer_list<double> values);
 
-/// Every drive b of the tower's axes, n_free x n_axes [kg].
-[[nodiscard]] Eigen::MatrixXd drives(const Assembly& assembly);
-
 /// A tower with the modes it asks for by number, or with all it has. Not to be copied: the problem refers to
 /// the matrices.
 struct Vibrating {

@@ -6,12 +6,7 @@ namespace swaymark::test {
 
 Model model_of(const Tower& tower) {
   Model model{assemble(tower), {}};
-  const auto& axes = model.assembly.dofs.axes();
-  model.drive.resize(model.mass().rows(), static_cast<Index>(axes.size()));
-  for (std::size_t k = 0; k < axes.size(); ++k) {
-    model.drive.col(static_cast<Index>(k)) =
-        inertia_vector(model.assembly, rigid_translation(model.assembly.dofs, axes[k]));
-  }
+  model.drive = inertia_vectors(model.assembly);
   return model;
 }
 

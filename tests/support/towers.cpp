@@ -80,6 +80,18 @@ Tower rod(int elements, double length, MassScheme scheme) {
   return tower;
 }
 
+Tower portal(double lean) {
+  Tower tower = bare_tower(2);
+  fix(tower, add_node(tower, {0.0, 0.0, 0.0}));
+  fix(tower, add_node(tower, {4.0, 0.0, 0.0}));
+  add_node(tower, {3.0 * lean, 0.0, 3.0});
+  add_node(tower, {4.0 - 3.0 * lean, 0.0, 3.0});
+  add_bar(tower, 0, 2);
+  add_bar(tower, 1, 3);
+  add_bar(tower, 2, 3);
+  return tower;
+}
+
 Tower regular_mast(const Mast& mast) {
   Tower tower = bare_tower(3);
   const auto legs = static_cast<std::size_t>(mast.legs);

@@ -26,6 +26,10 @@ void stand_tank(Tower& tower, const std::vector<std::size_t>& nodes, double radi
 /// A fixed-free rod along x of equal elements. \param length [m]
 [[nodiscard]] Tower rod(int elements, double length, MassScheme scheme);
 
+/// Two posts of 3 m, 4 m apart on held feet (nodes 1 and 2), and a beam on them (3 to 4), without a diagonal:
+/// it sways. \param lean  of the posts inwards, horizontal over vertical.
+[[nodiscard]] Tower portal(double lean = 0.0);
+
 /// A mast whose plan is a regular polygon: legs, an X in every face of every panel, horizontals, and plan
 /// bracing from a node in the middle of each level, so that its symmetry is that of the polygon. Base nodes
 /// are fixed.
