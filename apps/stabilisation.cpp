@@ -133,7 +133,8 @@ std::string stabilisation_note(const Stabilisation& study) {
       study.springs == 1 ? "" : "s", range_words(study.softest, study.stiffest), from, to,
       study.independent() ? "do not depend on them" : "DEPEND on them, so hold these nodes by bars", figures,
       100.0 * largest);
-  if (study.share_of_weight > 0.0)
+  constexpr double rounding = 1e-6;
+  if (study.share_of_weight > rounding)
     note += fmt::format("; their forces under dead load add up to {:.2g} % of the weight",
                         100.0 * study.share_of_weight);
   return note;
