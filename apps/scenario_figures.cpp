@@ -11,6 +11,7 @@ namespace swaymark {
 namespace {
 
 constexpr Index kModesShown = 3;
+constexpr std::string_view kSloshing = "liquid";  // the character of such a mode
 
 using Value = std::optional<double>;
 
@@ -29,9 +30,10 @@ void add_where_any(FigureRow row, std::vector<FigureRow>& rows) {
   if (any) rows.push_back(std::move(row));
 }
 
-Value first_torsion(const Analysis& a) {
+// The frequency of the n-th mode, from 0, whose character is the word, or is not.
+Value nth_mode(const Analysis& a, Index n, std::string_view word, bool is) {
   for (Index j = 0; j < a.mode_count(); ++j) {
-    if (a.character[static_cast<std::size_t>(j)] == "torsion") return a.frequency(j);
+    if ((a.character[static_cast<std::size_t>(j)] == word) == is && n-- == 0) return a.frequency(j);
   }
   return std::nullopt;
 }
@@ -54,16 +56,22 @@ void add_masses(const Study& study, std::vector<FigureRow>& rows) {
   }
 }
 
+// Sloshing is set apart, so that the tower's own modes are compared with each other in every state.
 void add_frequencies(const Study& study, std::vector<FigureRow>& rows) {
+  const std::string liquid(kSloshing);
+  FigureRow sloshing = row_of(study, "first sloshing", "Hz", true,
+                              [&](const Analysis& a) { return nth_mode(a, 0, liquid, true); });
+  const bool any = std::any_of(sloshing.values.begin(), sloshing.values.end(),
+                               [](const Value& v) { return v.has_value(); });
   for (Index j = 0; j < kModesShown; ++j) {
-    add_where_any(row_of(study, fmt::format("mode {}", j + 1), "Hz", true,
-                         [&](const Analysis& a) -> Value {
-                           if (j < a.mode_count()) return a.frequency(j);
-                           return std::nullopt;
-                         }),
+    add_where_any(row_of(study, fmt::format("{} {}", any ? "tower's mode" : "mode", j + 1), "Hz", true,
+                         [&](const Analysis& a) { return nth_mode(a, j, liquid, false); }),
                   rows);
   }
-  add_where_any(row_of(study, "first torsion", "Hz", true, first_torsion), rows);
+  add_where_any(row_of(study, "first torsion", "Hz", true,
+                       [](const Analysis& a) { return nth_mode(a, 0, "torsion", true); }),
+                rows);
+  add_where_any(std::move(sloshing), rows);
 }
 
 void add_base(const Study& study, std::vector<FigureRow>& rows) {
